@@ -27,3 +27,7 @@ export function env(): Env {
   }
   return read;
 }
+
+/** For migrations and the tests' own databases alone; the application never holds it. */
+export const ownerUrl = (): string =>
+  z.url({ error: "DATABASE_OWNER_URL is missing" }).parse(process.env.DATABASE_OWNER_URL);

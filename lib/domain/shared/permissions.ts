@@ -1,0 +1,67 @@
+import type { Role } from "./roles";
+
+/** Everything that anybody may be allowed to do. A verb or read names exactly one. */
+export const PERMISSIONS = [
+  "account:own",
+  "audit:read",
+  "company:found",
+  "company:read",
+  "company:write",
+  "customer:read",
+  "customer:write",
+  "delivery:read",
+  "delivery:retry",
+  "field:read",
+  "find:read",
+  "invitation:accept",
+  "job:read",
+  "job:write",
+  "mail:send",
+  "password:reset",
+  "person:read",
+  "person:write",
+  "portal:read",
+  "site:read",
+  "site:write",
+  "visit:read",
+  "visit:write",
+] as const;
+export type Permission = (typeof PERMISSIONS)[number];
+
+const OFFICE = [
+  "account:own",
+  "company:read",
+  "customer:read",
+  "find:read",
+  "job:read",
+  "person:read",
+  "site:read",
+  "visit:read",
+] as const satisfies readonly Permission[];
+
+/** The one table of who may do what; row-level security decides on which rows. */
+export const ROLE_GRANTS: Record<Role, readonly Permission[]> = {
+  owner: [
+    ...OFFICE,
+    "audit:read",
+    "company:write",
+    "customer:write",
+    "delivery:read",
+    "delivery:retry",
+    "job:write",
+    "person:write",
+    "site:write",
+    "visit:write",
+  ],
+  dispatcher: [...OFFICE, "customer:write", "job:write", "site:write", "visit:write"],
+  bookkeeper: [...OFFICE, "customer:write"],
+  technician: ["account:own", "field:read", "find:read"],
+  customer: ["account:own", "find:read", "portal:read"],
+};
+
+/** What a signed link may carry. */
+export const LINK_GRANTS = ["invitation:accept", "password:reset"] as const satisfies readonly Permission[];
+export type LinkGrant = (typeof LINK_GRANTS)[number];
+
+export const WORKER_GRANTS: readonly Permission[] = ["mail:send"];
+export const OPERATOR_GRANTS: readonly Permission[] = ["company:found"];

@@ -1,0 +1,45 @@
+import moment from "moment-timezone";
+
+/**
+ * The only converter between wall clocks and instants. Its zone data comes from a package and is newer than the
+ * runtime's own, so `Intl` is never asked about a site's zone.
+ */
+export const zoneDataVersion: string = moment.tz.dataVersion;
+
+/** An IANA zone name, for example `America/Chicago`. */
+export type Zone = string;
+/** A calendar date, `YYYY-MM-DD`. */
+export type CalendarDate = string;
+/** A wall clock reading without a zone, `YYYY-MM-DDTHH:mm`. */
+export type LocalTime = string;
+
+const LOCAL_FORMAT = "YYYY-MM-DDTHH:mm";
+
+export const isZone = (name: string): boolean => moment.tz.zone(name) !== null && name.includes("/");
+
+/** Names of all zones of one country (ISO 3166-1 alpha-2), sorted. */
+export const zonesOfCountry = (country: string): Zone[] => moment.tz.zonesForCountry(country).slice().sort();
+
+/**
+ * The instant of a wall clock reading. Of a reading that occurs twice (clocks go back) the first; a reading that is
+ * skipped (clocks go forward) is moved on by the gap, as RFC 5545 section 3.3.5 asks.
+ */
+export const toInstant = (local: LocalTime, zone: Zone): Date => moment.tz(local, LOCAL_FORMAT, true, zone).toDate();
+
+export const toLocalTime = (instant: Date, zone: Zone): LocalTime => moment.tz(instant, zone).format(LOCAL_FORMAT);
+
+export const calendarDate = (instant: Date, zone: Zone): CalendarDate => toLocalTime(instant, zone).slice(0, 10);
+
+export const startOfDate = (date: CalendarDate, zone: Zone): Date => toInstant(`${date}T00:00`, zone);
+
+/** Calendar dates count in days, whatever the clocks do. */
+export const addDays = (date: CalendarDate, days: number): CalendarDate =>
+  moment.utc(date, "YYYY-MM-DD", true).add(days, "days").format("YYYY-MM-DD");
+
+export const daysBetween = (from: CalendarDate, to: CalendarDate): number =>
+  moment.utc(to, "YYYY-MM-DD", true).diff(moment.utc(from, "YYYY-MM-DD", true), "days");
+
+/** For people: `Tue, Dec 1` and `7:30 AM CST`. */
+export const dateWords = (date: CalendarDate): string =>
+  moment.utc(date, "YYYY-MM-DD", true).format("ddd, MMM D, YYYY");
+export const timeWords = (instant: Date, zone: Zone): string => moment.tz(instant, zone).format("h:mm A z");

@@ -1,0 +1,36 @@
+import { DrizzleQueryError } from "drizzle-orm";
+import { AppError } from "@/lib/errors";
+
+type Refusal = { code: string; constraint_name?: string };
+
+/** What a refused constraint means to the person who ran into it. */
+const CONSTRAINT_WORDS: Record<string, string> = {
+  customers_name_unique: "There is already a customer of that name",
+  licenses_number_unique: "That license number is already recorded",
+  member_details_email_unique: "Somebody with that e-mail address is already here",
+  members_user_unique: "That person is already a member",
+  site_holders_once: "That customer already holds the site in this capacity at that time",
+  site_holders_one_payer: "Somebody else already pays for the site at that time",
+  sites_address_unique: "There is already a site of that name at that address",
+  visit_crew_once: "That person is already on the crew",
+  visit_crew_one_place: "That person is already booked at that time",
+};
+
+const CODES: Record<string, (refusal: Refusal) => AppError> = {
+  CD401: () => new AppError("unauthenticated", "Please sign in"),
+  "23505": (r) => new AppError("conflict", words(r, "That exists already")),
+  "23P01": (r) => new AppError("conflict", words(r, "That overlaps with something that is already there")),
+  "23503": () => new AppError("not_found", "Something that this refers to does not exist"),
+  "23514": () => new AppError("invalid", "The database refused a value that is out of range"),
+  "42501": () => new AppError("forbidden", "You may not do that"),
+};
+
+const words = (refusal: Refusal, otherwise: string) => CONSTRAINT_WORDS[refusal.constraint_name ?? ""] ?? otherwise;
+
+/** The database's refusals in our own vocabulary; what is not a refusal stays what it was. */
+export function translated(error: unknown): unknown {
+  const cause = error instanceof DrizzleQueryError ? error.cause : error;
+  if (cause === null || typeof cause !== "object" || !("code" in cause)) return error;
+  const refusal = cause as Refusal;
+  return CODES[refusal.code]?.(refusal) ?? error;
+}

@@ -1,0 +1,92 @@
+import { listAudit } from "./audit/list-audit";
+import type { Verb } from "./command";
+import { foundCompany } from "./company/found-company";
+import { getCompany } from "./company/get-company";
+import { getFrame } from "./company/get-frame";
+import { updateCompany } from "./company/update-company";
+import { addContact } from "./customers/add-contact";
+import { createCustomer } from "./customers/create-customer";
+import { endContact } from "./customers/end-contact";
+import { getCustomer } from "./customers/get-customer";
+import { listCustomers } from "./customers/list-customers";
+import { updateCustomer } from "./customers/update-customer";
+import { find } from "./find/find";
+import { createJob } from "./jobs/create-job";
+import { listJobs } from "./jobs/list-jobs";
+import { listDeadLetters } from "./messages/list-dead-letters";
+import { retryDeadLetter } from "./messages/retry-dead-letter";
+import { sendPasswordReset } from "./messages/send-password-reset";
+import { sendSignInLink } from "./messages/send-sign-in-link";
+import { acceptInvitation } from "./people/accept-invitation";
+import { changeRole } from "./people/change-role";
+import { endMembership } from "./people/end-membership";
+import { getPerson } from "./people/get-person";
+import { inviteContact } from "./people/invite-contact";
+import { inviteStaff } from "./people/invite-staff";
+import { listPeople } from "./people/list-people";
+import { recordLicense } from "./people/record-license";
+import { resendInvitation } from "./people/resend-invitation";
+import { resetPassword } from "./people/reset-password";
+import { restoreMembership } from "./people/restore-membership";
+import { setHome } from "./people/set-home";
+import { signOutEverywhere } from "./people/sign-out-everywhere";
+import { addHolder } from "./sites/add-holder";
+import { createSite } from "./sites/create-site";
+import { endHolder } from "./sites/end-holder";
+import { getSite } from "./sites/get-site";
+import { listSites } from "./sites/list-sites";
+import { updateSite } from "./sites/update-site";
+import { cancelVisit } from "./visits/cancel-visit";
+import { getFieldDay } from "./visits/get-field-day";
+import { getPortal } from "./visits/get-portal";
+import { getRunSheet } from "./visits/get-run-sheet";
+import { planVisit } from "./visits/plan-visit";
+
+/** Everything that can be done or read. Doors (actions, routes, worker, sync) take verbs from nowhere else. */
+export const COMMANDS: readonly Verb[] = [
+  foundCompany,
+  updateCompany,
+  addContact,
+  createCustomer,
+  endContact,
+  updateCustomer,
+  createJob,
+  retryDeadLetter,
+  sendPasswordReset,
+  sendSignInLink,
+  acceptInvitation,
+  changeRole,
+  endMembership,
+  inviteContact,
+  inviteStaff,
+  recordLicense,
+  resendInvitation,
+  resetPassword,
+  restoreMembership,
+  setHome,
+  signOutEverywhere,
+  addHolder,
+  createSite,
+  endHolder,
+  updateSite,
+  cancelVisit,
+  planVisit,
+];
+
+export const QUERIES: readonly Verb[] = [
+  listAudit,
+  getCompany,
+  getFrame,
+  getCustomer,
+  listCustomers,
+  find,
+  listJobs,
+  listDeadLetters,
+  getPerson,
+  listPeople,
+  getSite,
+  listSites,
+  getFieldDay,
+  getPortal,
+  getRunSheet,
+];

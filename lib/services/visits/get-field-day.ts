@@ -1,0 +1,60 @@
+import { and, eq, inArray, isNull } from "drizzle-orm";
+import { z } from "zod";
+import { companies } from "@/db/schema/company";
+import { contacts } from "@/db/schema/customers";
+import { siteAccess, siteHolders } from "@/db/schema/sites";
+import { addDays, calendarDate, startOfDate } from "@/lib/domain/shared/zone";
+import { AppError, notFound } from "@/lib/errors";
+import { query } from "@/lib/services/command";
+import { visitsBetween } from "./internal";
+
+const DAYS_SHOWN = 7;
+
+/** The signed-in technician's own visits, today and the days after, with what is needed to get in. */
+export const getFieldDay = query({
+  name: "field.day",
+  needs: "field:read",
+  input: z.object({}),
+  async run({ tx, who, now }) {
+    if (who.kind !== "person") throw new AppError("forbidden", "Only people have a day");
+    const [company] = await tx
+      .select({ zone: companies.zone, phone: companies.phone, name: companies.name })
+      .from(companies);
+    if (!company) throw notFound("company");
+    const today = calendarDate(now, company.zone);
+    const all = await visitsBetween(
+      tx,
+      startOfDate(today, company.zone),
+      startOfDate(addDays(today, DAYS_SHOWN), company.zone),
+    );
+    const mine = all.filter((visit) => visit.crew.some((person) => person.memberId === who.memberId));
+    const siteIds = [...new Set(mine.map((visit) => visit.site.id))];
+    const notes =
+      siteIds.length === 0 ? [] : await tx.select().from(siteAccess).where(inArray(siteAccess.siteId, siteIds));
+    const people =
+      siteIds.length === 0
+        ? []
+        : await tx
+            .selectDistinct({
+              siteId: siteHolders.siteId,
+              name: contacts.name,
+              title: contacts.title,
+              phone: contacts.phone,
+            })
+            .from(siteHolders)
+            .innerJoin(
+              contacts,
+              and(eq(contacts.companyId, siteHolders.companyId), eq(contacts.customerId, siteHolders.customerId)),
+            )
+            .where(and(inArray(siteHolders.siteId, siteIds), isNull(contacts.endedAt)));
+    return {
+      company,
+      today,
+      visits: mine.map((visit) => ({
+        ...visit,
+        accessNote: notes.find((note) => note.siteId === visit.site.id)?.note ?? null,
+        contacts: people.filter((person) => person.siteId === visit.site.id),
+      })),
+    };
+  },
+});

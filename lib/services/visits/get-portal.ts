@@ -1,0 +1,25 @@
+import { z } from "zod";
+import { companies } from "@/db/schema/company";
+import { sites } from "@/db/schema/sites";
+import { notFound } from "@/lib/errors";
+import { query } from "@/lib/services/command";
+import { visitsBetween } from "./internal";
+
+const PAST_DAYS = 365;
+const COMING_DAYS = 365;
+const DAY_MS = 86_400_000;
+
+/** What a customer's contact may see: their sites, and who comes when. */
+export const getPortal = query({
+  name: "portal.home",
+  needs: "portal:read",
+  input: z.object({}),
+  async run({ tx, now }) {
+    const [company] = await tx.select({ name: companies.name, phone: companies.phone }).from(companies);
+    if (!company) throw notFound("company");
+    const held = await tx.select().from(sites).orderBy(sites.name);
+    const from = new Date(now.getTime() - PAST_DAYS * DAY_MS);
+    const to = new Date(now.getTime() + COMING_DAYS * DAY_MS);
+    return { company, sites: held, visits: await visitsBetween(tx, from, to) };
+  },
+});
