@@ -25,6 +25,9 @@ revoke update, delete on audit_entries from coastdown_app;
 revoke delete on companies, members, customers, sites, jobs, visits, visit_crew, contacts, site_holders, messages, outbox, links, series from coastdown_app;
 grant usage on schema identity, ops to coastdown_app;
 grant select, insert, update, delete on all tables in schema identity, ops to coastdown_app;
+-- So that the health check can compare what is applied with what the application was built with.
+grant usage on schema drizzle to coastdown_app;
+grant select on drizzle.__drizzle_migrations to coastdown_app;
 grant usage on schema public, identity to coastdown_gate;
 grant select on companies, members, contacts, site_holders, contact_sites, visits, visit_crew, links, outbox to coastdown_gate;
 grant update on outbox to coastdown_gate;
