@@ -1,0 +1,54 @@
+import { rmSync } from "node:fs";
+import { folderFor, readState } from "./checkout.mjs";
+import { installSystemPackages } from "./debian.mjs";
+import { tryLock } from "./locks.mjs";
+import { installPackages } from "./packages.mjs";
+import { applicationPort } from "./ports.mjs";
+import { stopAll, stopOnSignals } from "./processes.mjs";
+import { say, sayFailure } from "./progress.mjs";
+import { interruptRuns } from "./run.mjs";
+import { bringUp, openDatabase, stateFile } from "./stack.mjs";
+
+function sayRunning(command, holder, { address, inbox }) {
+  if (!address)
+    return say(`\`${command}\` is already starting (process ${holder.pid}); its address will appear there.`);
+  say(`Already running (process ${holder.pid}): ${address}`);
+  if (inbox) say(`Sent mail: ${inbox}`);
+  say(`Stop it with Ctrl-C where it runs, or: kill ${holder.pid}`);
+}
+
+function sayReady({ address, inbox, demo }) {
+  say();
+  if (demo) say(`${demo}\n`);
+  say(`Coastdown: ${address}`);
+  if (inbox) say(`Sent mail: ${inbox}`);
+  say("Ctrl-C stops everything.");
+}
+
+async function prepare(purpose) {
+  const ownDatabase = !process.env.DATABASE_URL;
+  await installPackages();
+  if (ownDatabase) await installSystemPackages("postgres");
+  rmSync(stateFile(purpose), { force: true });
+}
+
+/** From whatever there is to the product on its address, until it is told to stop. */
+export async function serve({ command, purpose, programs, show }) {
+  const lock = tryLock(folderFor(purpose));
+  if (lock.holder) return sayRunning(command, lock.holder, readState(stateFile(purpose), {}));
+  process.once("exit", lock.release);
+  stopOnSignals(() => {
+    say("\nStopping …");
+    interruptRuns();
+  });
+  try {
+    await prepare(purpose);
+    const run = await programs();
+    const port = await applicationPort();
+    sayReady(await bringUp({ purpose, programs: run, port, show, database: await openDatabase(purpose, "coastdown") }));
+  } catch (error) {
+    sayFailure(error);
+    await stopAll();
+    process.exit(1);
+  }
+}

@@ -1,0 +1,105 @@
+import { randomBytes } from "node:crypto";
+import { join } from "node:path";
+import { setTimeout as pause } from "node:timers/promises";
+import { folderFor, readState, writeState } from "./checkout.mjs";
+import { startCluster } from "./cluster.mjs";
+import { freePort } from "./ports.mjs";
+import { leash, supervise } from "./processes.mjs";
+import { Explained, step } from "./progress.mjs";
+import { run } from "./run.mjs";
+
+const readyPatience = 90_000;
+
+export const stateFile = (purpose) => join(folderFor(purpose), "state.json");
+
+/** Databases given from outside, or a cluster of our own in the purpose's folder. */
+export async function openDatabase(purpose, name, { fresh = false } = {}) {
+  const { DATABASE_URL, DATABASE_OWNER_URL } = process.env;
+  if (DATABASE_URL && DATABASE_OWNER_URL) return { urls: { DATABASE_URL, DATABASE_OWNER_URL } };
+  if (DATABASE_URL || DATABASE_OWNER_URL) throw new Explained("Give DATABASE_URL and DATABASE_OWNER_URL together.");
+  const folder = folderFor(purpose);
+  const cluster = await step("Starting PostgreSQL", () =>
+    startCluster(folder, { onLaunch: (pid) => note(purpose, { postgres: pid }) }),
+  );
+  await cluster.makeDatabase(name, { fresh });
+  return { ...cluster, urls: cluster.urls(name) };
+}
+
+/** What runs under which process number, for a second launcher and for tests that kill things. */
+function note(purpose, change) {
+  const file = stateFile(purpose);
+  const state = readState(file, {});
+  writeState(file, { ...state, ...change });
+}
+
+function authSecret(folder) {
+  const file = join(folder, "auth-secret.json");
+  const secret = readState(file, undefined) ?? randomBytes(32).toString("base64url");
+  writeState(file, secret);
+  return secret;
+}
+
+async function startMail(purpose) {
+  if (process.env.SMTP_URL) return { smtpUrl: process.env.SMTP_URL };
+  const folder = folderFor(purpose);
+  const kept = readState(join(folder, "mail-ports.json"), { smtp: 1025, http: 8025 });
+  const ports = { smtp: await freePort(kept.smtp), http: await freePort(kept.http) };
+  writeState(join(folder, "mail-ports.json"), ports);
+  const main = join(import.meta.dirname, "mail/main.mjs");
+  const options = ["--smtp", ports.smtp, "--http", ports.http, "--dir", join(folder, "mail")].map(String);
+  start(purpose, "mail", { command: process.execPath, args: [...leash, main, ...options], cwd: folder });
+  const inbox = `http://localhost:${ports.http}`;
+  await untilAnswering("mail", `${inbox}/api/messages`);
+  return { smtpUrl: `smtp://127.0.0.1:${ports.smtp}`, inbox };
+}
+
+function start(purpose, name, program, show = false) {
+  const logFile = join(folderFor(purpose), `${name}.log`);
+  return supervise({ ...program, name, logFile, show, onLaunch: (pid) => note(purpose, { [name]: pid }) });
+}
+
+async function untilAnswering(name, url) {
+  let last = "";
+  for (const end = Date.now() + readyPatience; Date.now() < end; await pause(100)) {
+    try {
+      const answer = await fetch(url, { signal: AbortSignal.timeout(10_000) });
+      if (answer.ok) return;
+      last = `${answer.status} ${await answer.text()}`;
+    } catch (error) {
+      last = error.cause?.code ?? error.message;
+    }
+  }
+  throw new Explained(`The ${name} does not answer at ${url}: ${last}`);
+}
+
+const once = (program, env) =>
+  run(program.command, program.args, { cwd: program.cwd, env: { ...program.env, ...env } });
+
+/** Brings up everything that a user of the product meets; answers where it is and what the demo loader said. */
+export async function bringUp({ purpose, database, programs, port, show = false }) {
+  await step("Applying migrations", async () => {
+    const { stdout } = await once(programs.migrate, { DATABASE_OWNER_URL: database.urls.DATABASE_OWNER_URL });
+    return stdout.trim().split("\n").at(-1);
+  });
+  const { smtpUrl, inbox } = await step("Starting the mail stand-in", () => startMail(purpose));
+  const address = process.env.APP_URL ?? `http://localhost:${port}`;
+  const env = {
+    DATABASE_URL: database.urls.DATABASE_URL,
+    DATABASE_OWNER_URL: undefined,
+    AUTH_SECRET: process.env.AUTH_SECRET ?? authSecret(folderFor(purpose)),
+    APP_URL: address,
+    SMTP_URL: smtpUrl,
+    DEMO: process.env.DEMO ?? "on",
+  };
+  const demo =
+    env.DEMO === "on" ? await step("Loading the demo company", () => once(programs.demo, env)) : { stdout: "" };
+  await step("Starting the application and its worker", async () => {
+    start(purpose, "worker", withEnv(programs.worker, env), show);
+    start(purpose, "app", withEnv(programs.app(port), env), show);
+    await untilAnswering("application", `http://localhost:${port}/api/health`);
+  });
+  note(purpose, { address, inbox });
+  return { address, inbox, demo: demo.stdout.trimEnd(), env };
+}
+
+const withEnv = (program, env) => ({ ...program, env: { ...program.env, ...env } });
