@@ -1,6 +1,5 @@
 import { listAudit } from "./audit/list-audit";
 import type { Verb } from "./command";
-import { foundCompany } from "./company/found-company";
 import { getCompany } from "./company/get-company";
 import { getFrame } from "./company/get-frame";
 import { updateCompany } from "./company/update-company";
@@ -20,6 +19,7 @@ import { sendSignInLink } from "./messages/send-sign-in-link";
 import { acceptInvitation } from "./people/accept-invitation";
 import { changeRole } from "./people/change-role";
 import { endMembership } from "./people/end-membership";
+import { foundCompany } from "./people/found-company";
 import { getPerson } from "./people/get-person";
 import { inviteContact } from "./people/invite-contact";
 import { inviteStaff } from "./people/invite-staff";

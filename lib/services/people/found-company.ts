@@ -1,14 +1,15 @@
 import { companies } from "@/db/schema/company";
 import { FoundCompanyInput } from "@/lib/domain/company/schemas";
 import { command } from "@/lib/services/command";
-import { addMember, userForAddress } from "@/lib/services/people/internal";
+import { addMember, userForAddress } from "./internal";
+import { sendInvitation } from "./invitation";
 
 /** Once per company, from the operator's command line: no web page founds companies. */
 export const foundCompany = command({
   name: "company.found",
   needs: "company:found",
   input: FoundCompanyInput,
-  async run({ tx, who }, { companyId: _, ownerName, ownerEmail, ...company }) {
+  async run({ tx, who, now }, { companyId: _, ownerName, ownerEmail, ...company }) {
     await tx.insert(companies).values({ ...company, companyId: who.companyId });
     const userId = await userForAddress(tx, ownerEmail, ownerName);
     const memberId = await addMember(tx, who, {
@@ -18,6 +19,7 @@ export const foundCompany = command({
       email: ownerEmail,
       phone: null,
     });
+    await sendInvitation(tx, who, { memberId, name: ownerName, email: ownerEmail, role: "owner" }, now);
     return {
       result: { companyId: who.companyId, memberId, userId },
       audit: { entity: "company", entityId: who.companyId, after: company },
