@@ -173,18 +173,19 @@ function clusterAt(programs, port, passwords) {
         },
       },
     );
+  const urls = (database) => ({
+    DATABASE_URL: url("coastdown_app", passwords.app, database),
+    DATABASE_OWNER_URL: url("coastdown_owner", passwords.owner, database),
+    DATABASE_ADMIN_URL: url("postgres", passwords.admin, database),
+  });
   return {
     psql,
-    programs,
-    urls: (database) => ({
-      DATABASE_URL: url("coastdown_app", passwords.app, database),
-      DATABASE_OWNER_URL: url("coastdown_owner", passwords.owner, database),
-      DATABASE_ADMIN_URL: url("postgres", passwords.admin, database),
-    }),
-    async makeDatabase(name, { fresh = false } = {}) {
+    /** The addresses of a database, made if there is none of that name or if a fresh one is wanted. */
+    async database(name, { fresh = false } = {}) {
       if (fresh) await psql("postgres", ["-c", `drop database if exists ${name} with (force)`]);
-      const { stdout } = await psql("postgres", ["-At", "-c", `select 1 from pg_database where datname = '${name}'`]);
-      if (!stdout.trim()) await psql("postgres", ["-c", `create database ${name} owner coastdown_owner`]);
+      const { stdout } = await psql("postgres", ["-At", "-c", `select from pg_database where datname = '${name}'`]);
+      if (stdout === "") await psql("postgres", ["-c", `create database ${name} owner coastdown_owner`]);
+      return urls(name);
     },
   };
 }

@@ -87,7 +87,7 @@ function killAll() {
 }
 
 /** Ctrl-C, `kill` and a closed terminal end everything once, in order; a second Ctrl-C does not wait. */
-export function stopOnSignals(before) {
+export function stopOnSignals(before, after) {
   let asked = false;
   for (const [signal, code] of [
     ["SIGINT", 130],
@@ -97,8 +97,9 @@ export function stopOnSignals(before) {
     process.on(signal, async () => {
       if (asked) return killAll();
       asked = true;
-      await before?.();
+      before();
       await stopAll();
+      after?.();
       process.exit(code);
     });
   }

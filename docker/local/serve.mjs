@@ -7,7 +7,7 @@ import { applicationPort } from "./ports.mjs";
 import { stopAll, stopOnSignals } from "./processes.mjs";
 import { say, sayFailure } from "./progress.mjs";
 import { interruptRuns } from "./run.mjs";
-import { bringUp, openDatabase, stateFile } from "./stack.mjs";
+import { bringUp, openServer, stateFile } from "./stack.mjs";
 
 function sayRunning(command, holder, { address, inbox }) {
   if (!address)
@@ -45,7 +45,9 @@ export async function serve({ command, purpose, programs, show }) {
     await prepare(purpose);
     const run = await programs();
     const port = await applicationPort();
-    sayReady(await bringUp({ purpose, programs: run, port, show, database: await openDatabase(purpose, "coastdown") }));
+    const server = await openServer(purpose);
+    const urls = await server.database("coastdown");
+    sayReady(await bringUp({ purpose, urls, programs: run, port, show }));
   } catch (error) {
     sayFailure(error);
     await stopAll();

@@ -3,6 +3,7 @@ import { join } from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
 import { folderFor, readState, writeState } from "./checkout.mjs";
 import { startCluster } from "./cluster.mjs";
+import { givenServer } from "./given-server.mjs";
 import { freePort } from "./ports.mjs";
 import { leash, supervise } from "./processes.mjs";
 import { Explained, step } from "./progress.mjs";
@@ -12,17 +13,13 @@ const readyPatience = 90_000;
 
 export const stateFile = (purpose) => join(folderFor(purpose), "state.json");
 
-/** Databases given from outside, or a cluster of our own in the purpose's folder. */
-export async function openDatabase(purpose, name, { fresh = false } = {}) {
+/** The server with our databases: the one given from outside, or a cluster of our own in the purpose's folder. */
+export async function openServer(purpose) {
   const { DATABASE_URL, DATABASE_OWNER_URL } = process.env;
-  if (DATABASE_URL && DATABASE_OWNER_URL) return { urls: { DATABASE_URL, DATABASE_OWNER_URL } };
+  if (DATABASE_URL && DATABASE_OWNER_URL) return givenServer({ DATABASE_URL, DATABASE_OWNER_URL });
   if (DATABASE_URL || DATABASE_OWNER_URL) throw new Explained("Give DATABASE_URL and DATABASE_OWNER_URL together.");
-  const folder = folderFor(purpose);
-  const cluster = await step("Starting PostgreSQL", () =>
-    startCluster(folder, { onLaunch: (pid) => note(purpose, { postgres: pid }) }),
-  );
-  await cluster.makeDatabase(name, { fresh });
-  return { ...cluster, urls: cluster.urls(name) };
+  const onLaunch = (pid) => note(purpose, { postgres: pid });
+  return step("Starting PostgreSQL", () => startCluster(folderFor(purpose), { onLaunch }));
 }
 
 /** What runs under which process number, for a second launcher and for tests that kill things. */
@@ -76,15 +73,15 @@ const once = (program, env) =>
   run(program.command, program.args, { cwd: program.cwd, env: { ...program.env, ...env } });
 
 /** Brings up everything that a user of the product meets; answers where it is and what the demo loader said. */
-export async function bringUp({ purpose, database, programs, port, show = false }) {
+export async function bringUp({ purpose, urls, programs, port, show = false }) {
   await step("Applying migrations", async () => {
-    const { stdout } = await once(programs.migrate, { DATABASE_OWNER_URL: database.urls.DATABASE_OWNER_URL });
+    const { stdout } = await once(programs.migrate, { DATABASE_OWNER_URL: urls.DATABASE_OWNER_URL });
     return stdout.trim().split("\n").at(-1);
   });
   const { smtpUrl, inbox } = await step("Starting the mail stand-in", () => startMail(purpose));
   const address = process.env.APP_URL ?? `http://localhost:${port}`;
   const env = {
-    DATABASE_URL: database.urls.DATABASE_URL,
+    DATABASE_URL: urls.DATABASE_URL,
     DATABASE_OWNER_URL: undefined,
     AUTH_SECRET: process.env.AUTH_SECRET ?? authSecret(folderFor(purpose)),
     APP_URL: address,

@@ -1,0 +1,38 @@
+import { defineConfig, devices } from "@playwright/test";
+
+const asRoot = process.getuid?.() === 0;
+// Debian's Chromium refuses its sandbox to root, and has errands of its own on the network.
+const rootFlags = ["--no-sandbox"];
+const quietFlags = [
+  "--disable-quic",
+  "--no-first-run",
+  "--disable-background-networking",
+  "--disable-component-update",
+  "--disable-sync",
+];
+
+const browser = {
+  ...devices["Desktop Chrome"],
+  launchOptions: {
+    executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium",
+    args: asRoot ? [...rootFlags, ...quietFlags] : quietFlags,
+  },
+};
+
+export default defineConfig({
+  testDir: "tests/e2e",
+  outputDir: "test-results/e2e",
+  workers: 2,
+  fullyParallel: true,
+  forbidOnly: true,
+  reporter: [["list"], ["json", { outputFile: process.env.TEST_REPORT ?? "test-results/playwright.json" }]],
+  use: {
+    ...(process.env.APP_URL && { baseURL: process.env.APP_URL }),
+    screenshot: "only-on-failure",
+    trace: "retain-on-failure",
+  },
+  projects: [
+    { name: "desk", use: { ...browser, viewport: { width: 1440, height: 900 } } },
+    { name: "phone", use: { ...browser, viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true } },
+  ],
+});
