@@ -183,7 +183,7 @@ function clusterAt(programs, port, passwords) {
     /** The addresses of a database, made if there is none of that name or if a fresh one is wanted. */
     async database(name, { fresh = false } = {}) {
       if (fresh) await psql("postgres", ["-c", `drop database if exists ${name} with (force)`]);
-      const { stdout } = await psql("postgres", ["-At", "-c", `select from pg_database where datname = '${name}'`]);
+      const { stdout } = await psql("postgres", ["-At", "-c", `select 1 from pg_database where datname = '${name}'`]);
       if (stdout === "") await psql("postgres", ["-c", `create database ${name} owner coastdown_owner`]);
       return urls(name);
     },

@@ -86,14 +86,12 @@ function killAll() {
   for (const one of supervised) if (one.child) signalGroup(one.child.pid, "SIGKILL");
 }
 
+const codes = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
+
 /** Ctrl-C, `kill` and a closed terminal end everything once, in order; a second Ctrl-C does not wait. */
 export function stopOnSignals(before, after) {
   let asked = false;
-  for (const [signal, code] of [
-    ["SIGINT", 130],
-    ["SIGTERM", 143],
-    ["SIGHUP", 129],
-  ]) {
+  for (const [signal, code] of Object.entries(codes)) {
     process.on(signal, async () => {
       if (asked) return killAll();
       asked = true;
@@ -103,4 +101,16 @@ export function stopOnSignals(before, after) {
       process.exit(code);
     });
   }
+  if (process.env.npm_lifecycle_event) stopWithParent();
+}
+
+/** npm does not pass on the signal that ends it. */
+function stopWithParent() {
+  const parent = process.ppid;
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return;
+    clearInterval(watch);
+    process.kill(process.pid, "SIGTERM");
+  }, 500);
+  watch.unref();
 }

@@ -42,9 +42,9 @@ export async function serve({ command, purpose, programs, show }) {
     interruptRuns();
   });
   try {
+    const port = await applicationPort();
     await prepare(purpose);
     const run = await programs();
-    const port = await applicationPort();
     const server = await openServer(purpose);
     const urls = await server.database("coastdown");
     sayReady(await bringUp({ purpose, urls, programs: run, port, show }));
