@@ -1,6 +1,7 @@
 -- The three roles of a cluster, for psql as a superuser. Safe to repeat; sets the passwords anew.
 -- coastdown_owner owns the databases, coastdown_app is the application, coastdown_gate owns the functions at the door.
 \set ON_ERROR_STOP on
+set client_min_messages = warning;
 \getenv owner_password COASTDOWN_OWNER_PASSWORD
 \getenv app_password COASTDOWN_APP_PASSWORD
 

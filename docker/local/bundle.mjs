@@ -4,7 +4,7 @@ import { root } from "./checkout.mjs";
 import { Explained } from "./progress.mjs";
 
 /** The programs beside the application: `<out>/<name>.mjs` each. */
-const entries = { migrate: "db/migrate.ts", demo: "db/demo/load.ts", worker: "lib/worker/main.ts" };
+export const entries = { migrate: "db/migrate.ts", demo: "db/demo/load.ts", worker: "lib/worker/main.ts" };
 // Packages with machine code cannot be bundled; the application's own copies serve.
 const native = ["@node-rs/argon2"];
 

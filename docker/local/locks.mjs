@@ -9,7 +9,9 @@ import { say } from "./progress.mjs";
 export function bornAt(pid) {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, "utf8");
-    return stat.slice(stat.lastIndexOf(")") + 2).split(" ")[19];
+    const fields = stat.slice(stat.lastIndexOf(")") + 2).split(" ");
+    // Dead and waiting to be collected, which in a container may take long.
+    return fields[0] === "Z" ? undefined : fields[19];
   } catch {
     const ps = spawnSync("ps", ["-o", "lstart=", "-p", String(pid)], { encoding: "utf8" });
     return ps.stdout?.trim() || undefined;
