@@ -9,5 +9,8 @@ export const passwordSignInAction = passwordSignIn;
 export const linkSignInAction = linkSignIn;
 export const askPasswordResetAction = askPasswordReset;
 export const leaveAction = leave;
-export const acceptInvitationAction = action(acceptInvitation, { linkField: "token", to: () => "/sign-in?from=invitation" });
+export const acceptInvitationAction = action(acceptInvitation, {
+  linkField: "token",
+  to: () => "/sign-in?from=invitation",
+});
 export const resetPasswordAction = action(resetPassword, { linkField: "token", to: () => "/sign-in?from=reset" });

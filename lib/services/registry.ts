@@ -38,6 +38,7 @@ import { listSites } from "./sites/list-sites";
 import { updateSite } from "./sites/update-site";
 import { cancelVisit } from "./visits/cancel-visit";
 import { getFieldDay } from "./visits/get-field-day";
+import { getOverview } from "./visits/get-overview";
 import { getPortal } from "./visits/get-portal";
 import { getRunSheet } from "./visits/get-run-sheet";
 import { planVisit } from "./visits/plan-visit";
@@ -88,5 +89,6 @@ export const QUERIES: readonly Verb[] = [
   listSites,
   getFieldDay,
   getPortal,
+  getOverview,
   getRunSheet,
 ];

@@ -1,0 +1,62 @@
+import type { Metadata } from "next";
+import Link from "next/link";
+import { ContactForm, CustomerForm } from "@/components/customers/customer-form";
+import { RowAction } from "@/components/form/row-action";
+import { PageHeader, Section } from "@/components/layout/page-header";
+import { Card, EmptyState } from "@/components/ui/card";
+import { paths } from "@/lib/domain/shared/paths";
+import { HOLDER_CAPACITY_WORDS } from "@/lib/domain/sites/words";
+import { getCustomer } from "@/lib/services/customers/get-customer";
+import { read } from "@/lib/web/page";
+import { addContactAction, endContactAction, inviteContactAction, updateCustomerAction } from "../actions";
+
+export const metadata: Metadata = { title: "Customer" };
+
+export default async function CustomerPage({ params }: PageProps<"/customers/[customerId]">) {
+  const customer = await read(getCustomer, await params);
+  return (
+    <>
+      <PageHeader title={customer.name} note={customer.phone} />
+      <Section title="Contacts">
+        {customer.contacts.length === 0 && <EmptyState title="No contact yet" />}
+        {customer.contacts.map(({ contact, memberId }) => (
+          <Card key={contact.id} className="flex flex-wrap items-center justify-between gap-2 p-3 sm:p-3">
+            <div>
+              <p className="font-semibold">{contact.name}</p>
+              <p className="text-sm text-muted">{contact.title}</p>
+              <p className="figures text-sm">{[contact.phone, contact.email].filter(Boolean).join(" · ")}</p>
+            </div>
+            {contact.endedAt ? (
+              <p className="text-muted">Ended</p>
+            ) : (
+              <div className="flex flex-wrap gap-2">
+                {memberId ? (
+                  <p className="self-center text-sm text-muted">Can sign in</p>
+                ) : (
+                  <RowAction action={inviteContactAction} name="contactId" value={contact.id} button="Invite" />
+                )}
+                <RowAction action={endContactAction} name="contactId" value={contact.id} button="End" danger />
+              </div>
+            )}
+          </Card>
+        ))}
+        <ContactForm action={addContactAction} customerId={customer.id} />
+      </Section>
+      <Section title="Sites">
+        <ul className="grid gap-1">
+          {customer.holdings.map(({ holder, site }) => (
+            <li key={holder.id}>
+              <Link href={paths.site(site.id)} className="font-semibold hover:underline">
+                {site.name}
+              </Link>
+              , {HOLDER_CAPACITY_WORDS[holder.capacity]}
+            </li>
+          ))}
+        </ul>
+      </Section>
+      <Section title="Change">
+        <CustomerForm action={updateCustomerAction} customer={customer} />
+      </Section>
+    </>
+  );
+}

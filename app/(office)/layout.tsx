@@ -1,0 +1,39 @@
+import { notFound } from "next/navigation";
+import { FindButton } from "@/components/find/find-button";
+import type { NavItem } from "@/components/layout/nav-links";
+import { Shell } from "@/components/layout/shell";
+import { paths } from "@/lib/domain/shared/paths";
+import type { Role } from "@/lib/domain/shared/roles";
+import { getFrame } from "@/lib/services/company/get-frame";
+import { read } from "@/lib/web/page";
+import { leaveAction } from "../(public)/actions";
+
+const EVERYONE: readonly NavItem[] = [
+  { href: paths.runSheet(), label: "Run sheet" },
+  { href: paths.jobs, label: "Jobs" },
+  { href: paths.sites, label: "Sites" },
+  { href: paths.customers, label: "Customers" },
+  { href: paths.people, label: "People" },
+];
+
+const NAV: Partial<Record<Role, readonly NavItem[]>> = {
+  owner: [
+    { href: paths.overview, label: "Overview" },
+    ...EVERYONE,
+    { href: paths.audit, label: "Audit trail" },
+    { href: paths.settings, label: "Settings" },
+  ],
+  dispatcher: EVERYONE,
+  bookkeeper: EVERYONE,
+};
+
+export default async function OfficeLayout({ children }: LayoutProps<"/">) {
+  const { company, role, personName } = await read(getFrame);
+  const items = NAV[role];
+  if (!items) notFound();
+  return (
+    <Shell companyName={company.name} personName={personName} items={items} find={<FindButton />} leave={leaveAction}>
+      {children}
+    </Shell>
+  );
+}

@@ -1,0 +1,23 @@
+import type { Metadata } from "next";
+import { PageHeader, Section } from "@/components/layout/page-header";
+import { SiteForm } from "@/components/sites/site-form";
+import { SiteSummary } from "@/components/sites/site-summary";
+import { zonesOfCountry } from "@/lib/domain/shared/zone";
+import { getSite } from "@/lib/services/sites/get-site";
+import { read } from "@/lib/web/page";
+import { updateSiteAction } from "../actions";
+
+export const metadata: Metadata = { title: "Site" };
+
+export default async function SitePage({ params }: PageProps<"/sites/[siteId]">) {
+  const site = await read(getSite, await params);
+  return (
+    <>
+      <PageHeader title={site.name} note={`${site.street}, ${site.city}, ${site.state} ${site.postalCode}`} />
+      <SiteSummary site={site} />
+      <Section title="Change">
+        <SiteForm action={updateSiteAction} zones={zonesOfCountry("US")} zone={site.zone} site={site} />
+      </Section>
+    </>
+  );
+}

@@ -1,0 +1,47 @@
+import { Card } from "@/components/ui/card";
+import { FIELD_WORDS_EN as WORDS } from "@/lib/domain/field/words";
+import { JOB_KIND_WORDS } from "@/lib/domain/jobs/words";
+import type { FieldVisit } from "@/lib/queries/field";
+
+export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
+  const { site, job, crew, accessNote, contacts } = visit;
+  return (
+    <Card className="grid gap-2 p-4">
+      <p className="figures text-lg font-bold">
+        {visit.startsLocal.replace("T", " ")}–{visit.endsLocal.slice(11)}
+      </p>
+      <h3 className="text-lg font-bold">{site.name}</h3>
+      <p>
+        {site.street}, {site.city}
+      </p>
+      <p>
+        {JOB_KIND_WORDS[job.kind]} <span className="figures">{job.number}</span>: {job.title}
+      </p>
+      {crew.length > 1 && (
+        <p>
+          {WORDS.with} {crew.map((person) => person.name).join(", ")}
+        </p>
+      )}
+      {accessNote && (
+        <p className="border-l-4 border-soon pl-3">
+          <span className="font-semibold">{WORDS.access}: </span>
+          {accessNote}
+        </p>
+      )}
+      {contacts
+        .filter((contact) => contact.phone)
+        .map((contact) => (
+          <a
+            key={contact.name}
+            href={`tel:${contact.phone}`}
+            className="flex min-h-12 items-center justify-between rounded-md border border-field-line px-3"
+          >
+            <span>
+              {WORDS.call} {contact.name}
+            </span>
+            <span className="figures">{contact.phone}</span>
+          </a>
+        ))}
+    </Card>
+  );
+}

@@ -1,0 +1,16 @@
+/** Every word of the technician's part stands in a message file, so that another language is another file. */
+export const FIELD_WORDS_EN = {
+  today: "Today",
+  later: "The days after",
+  nothingToday: "No visit today",
+  nothingTodayNext: "What is planned later stands below.",
+  nothingLater: "Nothing planned in the next days",
+  loading: "Looking for your visits…",
+  failed: "Your visits could not be fetched",
+  tryAgain: "Try again",
+  access: "Getting in",
+  with: "With",
+  call: "Call",
+  account: "Account",
+} as const;
+export type FieldWords = Record<keyof typeof FIELD_WORDS_EN, string>;
