@@ -11,6 +11,7 @@ export default defineConfig({
   test: {
     include: ["{lib,db,emails,components,docker,tests}/**/*.test.{ts,tsx}"],
     globalSetup: ["tests/setup/global.ts"],
+    setupFiles: ["tests/setup/worker.ts"],
     pool: "forks",
     maxWorkers: 2,
     testTimeout: 30_000,

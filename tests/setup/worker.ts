@@ -1,0 +1,15 @@
+import { inject } from "vitest";
+
+const databases = inject("databases");
+const mine = databases[(Number(process.env.VITEST_POOL_ID ?? 1) - 1) % databases.length];
+
+for (const name of ["DATABASE_URL", "DATABASE_OWNER_URL"]) {
+  process.env[name] = Object.assign(new URL(process.env[name] ?? ""), { pathname: `/${mine}` }).toString();
+}
+Object.assign(process.env, {
+  AUTH_SECRET: "only-for-tests-only-for-tests-only-for-tests",
+  APP_URL: "http://localhost:3000",
+  SMTP_URL: "smtp://127.0.0.1:1025",
+  NODE_ENV: "test",
+  LOG_LEVEL: "silent",
+});
