@@ -15,7 +15,3 @@ export function Textarea({ className, ...props }: React.ComponentProps<"textarea
 export function Select({ className, ...props }: React.ComponentProps<"select">) {
   return <select data-slot="select" className={cn(look, className)} {...props} />;
 }
-
-export function Checkbox({ className, ...props }: React.ComponentProps<"input">) {
-  return <input type="checkbox" data-slot="checkbox" className={cn("size-5 accent-settled", className)} {...props} />;
-}

@@ -10,7 +10,5 @@ export const PageInput = z.object({
 
 export const offsetOf = (page: number): number => (page - 1) * PAGE_SIZE;
 
-export type Page<T> = { rows: T[]; total: number; page: number; pageSize: number };
-
 /** A pattern for ILIKE that takes what was typed literally. */
 export const containing = (text: string): string => `%${text.replace(/[\\%_]/g, "\\$&")}%`;

@@ -13,4 +13,3 @@ export const FIELD_WORDS_EN = {
   call: "Call",
   account: "Account",
 } as const;
-export type FieldWords = Record<keyof typeof FIELD_WORDS_EN, string>;

@@ -20,4 +20,3 @@ export const MailTemplate = z.discriminatedUnion("template", [
   z.object({ template: z.literal("password-changed"), companyName: z.string(), name: z.string() }),
 ]);
 export type MailTemplate = z.infer<typeof MailTemplate>;
-export type MailName = MailTemplate["template"];

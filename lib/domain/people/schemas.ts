@@ -17,9 +17,7 @@ export const InviteStaffInput = z.object({
 
 export const InviteContactInput = z.object({ contactId: rowId });
 
-export const AcceptInvitationInput = z.object({ password: Password });
-
-export const ResetPasswordInput = AcceptInvitationInput;
+export const NewPasswordInput = z.object({ password: Password });
 
 export const ChangeRoleInput = z.object({ memberId: rowId, role: z.enum(STAFF_ROLES, { error: "Choose a role" }) });
 

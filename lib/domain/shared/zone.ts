@@ -39,7 +39,6 @@ export const addDays = (date: CalendarDate, days: number): CalendarDate =>
 export const daysBetween = (from: CalendarDate, to: CalendarDate): number =>
   moment.utc(to, "YYYY-MM-DD", true).diff(moment.utc(from, "YYYY-MM-DD", true), "days");
 
-/** For people: `Tue, Dec 1` and `7:30 AM CST`. */
+/** For people: `Tue, Dec 1, 2026`. */
 export const dateWords = (date: CalendarDate): string =>
   moment.utc(date, "YYYY-MM-DD", true).format("ddd, MMM D, YYYY");
-export const timeWords = (instant: Date, zone: Zone): string => moment.tz(instant, zone).format("h:mm A z");

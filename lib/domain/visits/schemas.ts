@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { calendarDateText, rowId } from "@/lib/domain/shared/inputs";
+import { rowId } from "@/lib/domain/shared/inputs";
 
 const localTime = z.string().regex(/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}$/, "That is not a date and time");
 
@@ -16,5 +16,3 @@ export const PlanVisitInput = z
   });
 
 export const CancelVisitInput = z.object({ visitId: rowId });
-
-export const DayInput = z.object({ date: calendarDateText });

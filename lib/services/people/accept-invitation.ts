@@ -2,7 +2,7 @@ import { eq } from "drizzle-orm";
 import { passwords, users } from "@/db/schema/identity";
 import { members } from "@/db/schema/people";
 import { hashPassword } from "@/lib/auth/password";
-import { AcceptInvitationInput } from "@/lib/domain/people/schemas";
+import { NewPasswordInput } from "@/lib/domain/people/schemas";
 import { AppError, notFound } from "@/lib/errors";
 import { command } from "@/lib/services/command";
 import { spendLink } from "@/lib/services/links";
@@ -12,7 +12,7 @@ import { setPassword } from "./internal";
 export const acceptInvitation = command({
   name: "person.accept-invitation",
   needs: "invitation:accept",
-  input: AcceptInvitationInput,
+  input: NewPasswordInput,
   async run({ tx, who, now }, { password }) {
     const memberId = await spendLink(tx, who, now);
     const [member] = await tx.select().from(members).where(eq(members.id, memberId));

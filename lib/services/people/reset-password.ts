@@ -2,7 +2,7 @@ import { eq } from "drizzle-orm";
 import { companies } from "@/db/schema/company";
 import { memberDetails, members } from "@/db/schema/people";
 import { hashPassword } from "@/lib/auth/password";
-import { ResetPasswordInput } from "@/lib/domain/people/schemas";
+import { NewPasswordInput } from "@/lib/domain/people/schemas";
 import { notFound } from "@/lib/errors";
 import { command } from "@/lib/services/command";
 import { spendLink } from "@/lib/services/links";
@@ -12,7 +12,7 @@ import { setPassword } from "./internal";
 export const resetPassword = command({
   name: "password.reset",
   needs: "password:reset",
-  input: ResetPasswordInput,
+  input: NewPasswordInput,
   async run({ tx, who, now }, { password }) {
     const memberId = await spendLink(tx, who, now);
     const [member] = await tx.select().from(members).where(eq(members.id, memberId));
