@@ -1,5 +1,6 @@
 // Loaded into each Node process that the launcher starts: when the launcher is gone, so is its end of this channel.
 const leave = () => process.kill(process.pid, "SIGTERM");
 process.on("disconnect", leave);
-if (!process.connected) leave();
+// A program run to its end has no such channel and needs none.
+if (process.send && !process.connected) leave();
 process.channel?.unref();
