@@ -10,7 +10,7 @@ const longestBackOff = 30_000;
 const steady = 60_000;
 
 // Node's children leave with the launcher even if it is killed without a chance to stop them.
-export const leash = ["--import", `file://${join(import.meta.dirname, "leash.mjs")}`];
+const leash = ["--import", `file://${join(import.meta.dirname, "leash.mjs")}`];
 
 const supervised = [];
 
@@ -29,7 +29,7 @@ export function supervise(program) {
 function launch(one) {
   const { command, args, env, cwd, uid, gid, onLeash = true, onLaunch } = one.program;
   const since = Date.now();
-  const child = spawn(command, args, {
+  const child = spawn(command, onLeash ? [...leash, ...args] : args, {
     cwd,
     uid,
     gid,

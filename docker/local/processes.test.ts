@@ -11,9 +11,9 @@ const folder = mkdtempSync(join(tmpdir(), "coastdown-processes-"));
 
 /** A launcher of one program, which tells the number of each process it starts. */
 function launcher(program: string) {
-  const code = `import { leash, stopOnSignals, supervise } from ${JSON.stringify(join(import.meta.dirname, "processes.mjs"))};
+  const code = `import { stopOnSignals, supervise } from ${JSON.stringify(join(import.meta.dirname, "processes.mjs"))};
     stopOnSignals(() => {});
-    supervise({ name: "program", command: process.execPath, args: [...leash, "-e", ${JSON.stringify(program)}],
+    supervise({ name: "program", command: process.execPath, args: ["-e", ${JSON.stringify(program)}],
       cwd: "/", logFile: ${JSON.stringify(join(folder, "log"))}, onLaunch: (pid) => console.log(pid) });`;
   const child = spawn(process.execPath, ["--input-type=module", "-e", code], { stdio: ["ignore", "pipe", "inherit"] });
   const lines = createInterface(child.stdout)[Symbol.asyncIterator]();

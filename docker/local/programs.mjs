@@ -1,6 +1,5 @@
 import { join } from "node:path";
 import { root } from "./checkout.mjs";
-import { leash } from "./processes.mjs";
 
 const node = process.execPath;
 const tsx = ["--import", "tsx"];
@@ -11,7 +10,7 @@ export const sourceEnv = { TSX_TSCONFIG_PATH: join(root, "docker/local/tsconfig.
 export function builtPrograms(build) {
   const from = (file) => ({
     command: node,
-    args: [...leash, join(build, file)],
+    args: [join(build, file)],
     cwd: build,
     env: { NODE_ENV: "production" },
   });
@@ -29,10 +28,10 @@ export function builtPrograms(build) {
 /** The same from the sources, with hot reload. */
 export function sourcePrograms() {
   const env = { ...sourceEnv, NODE_ENV: "development" };
-  const from = (file) => ({ command: node, args: [...leash, ...tsx, join(root, file)], cwd: root, env });
+  const from = (file) => ({ command: node, args: [...tsx, join(root, file)], cwd: root, env });
   const bin = (path, ...args) => ({
     command: node,
-    args: [...leash, join(root, "node_modules", path), ...args],
+    args: [join(root, "node_modules", path), ...args],
     cwd: root,
     env,
   });

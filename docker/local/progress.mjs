@@ -11,11 +11,17 @@ export function sayFailure(error) {
   say(error instanceof Explained ? `\n${error.message}` : `\n${error?.stack ?? error}`);
 }
 
+let innermost;
+
 /** One line when a step begins, one when it ends, and a sign of life while it takes long. */
 export async function step(title, work) {
   const from = performance.now();
   say(`→ ${title}`);
-  const alive = setInterval(() => say(`  … ${title}: ${Math.round(secondsSince(from))} s`), quietSeconds * 1000);
+  const outer = innermost;
+  innermost = title;
+  const alive = setInterval(() => {
+    if (innermost === title) say(`  … ${title}: ${Math.round(secondsSince(from))} s`);
+  }, quietSeconds * 1000);
   try {
     const result = await work();
     say(`✓ ${title}${typeof result === "string" ? `: ${result}` : ""} (${secondsSince(from)} s)`);
@@ -24,6 +30,7 @@ export async function step(title, work) {
     say(`✗ ${title} (${secondsSince(from)} s)`);
     throw error;
   } finally {
+    innermost = outer;
     clearInterval(alive);
   }
 }

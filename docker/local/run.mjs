@@ -3,6 +3,7 @@ import { Explained } from "./progress.mjs";
 
 const tailLines = 40;
 const running = new Set();
+const colors = process.stdout.isTTY ? { FORCE_COLOR: "1" } : { NO_COLOR: "1", FORCE_COLOR: "0" };
 
 /** Ends what is under way, for instance on Ctrl-C. Whole groups: npm and the browser have children of their own. */
 export function interruptRuns() {
@@ -25,7 +26,7 @@ export function run(command, args, { cwd, env = {}, show = false, uid, gid, mayF
       uid,
       gid,
       detached: true,
-      env: { ...process.env, ...env },
+      env: { ...process.env, ...colors, ...env },
       stdio: ["ignore", show ? "inherit" : "pipe", show ? "inherit" : "pipe"],
     });
     running.add(child);

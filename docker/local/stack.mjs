@@ -5,7 +5,7 @@ import { folderFor, readState, writeState } from "./checkout.mjs";
 import { startCluster } from "./cluster.mjs";
 import { givenServer } from "./given-server.mjs";
 import { freePort } from "./ports.mjs";
-import { leash, supervise } from "./processes.mjs";
+import { supervise } from "./processes.mjs";
 import { Explained, step } from "./progress.mjs";
 import { run } from "./run.mjs";
 
@@ -44,7 +44,7 @@ async function startMail(purpose) {
   writeState(join(folder, "mail-ports.json"), ports);
   const main = join(import.meta.dirname, "mail/main.mjs");
   const options = ["--smtp", ports.smtp, "--http", ports.http, "--dir", join(folder, "mail")].map(String);
-  start(purpose, "mail", { command: process.execPath, args: [...leash, main, ...options], cwd: folder });
+  start(purpose, "mail", { command: process.execPath, args: [main, ...options], cwd: folder });
   const inbox = `http://localhost:${ports.http}`;
   await untilAnswering("mail", `${inbox}/api/messages`);
   return { smtpUrl: `smtp://127.0.0.1:${ports.smtp}`, inbox };
