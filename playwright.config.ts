@@ -25,11 +25,14 @@ export default defineConfig({
   workers: 2,
   fullyParallel: true,
   forbidOnly: true,
+  // The machine is small and the whole product runs beside the browsers.
+  expect: { timeout: 15_000 },
   reporter: [["list"], ["json", { outputFile: process.env.TEST_REPORT ?? "test-results/playwright.json" }]],
   use: {
     ...(process.env.APP_URL && { baseURL: process.env.APP_URL }),
     screenshot: "only-on-failure",
-    trace: "retain-on-failure",
+    // Without a film of each test, which would cost as much time as the test.
+    trace: { mode: "retain-on-failure", screenshots: false },
   },
   projects: [
     { name: "desk", use: { ...browser, viewport: { width: 1440, height: 900 } } },
