@@ -1,0 +1,127 @@
+import { v7 as uuidv7 } from "uuid";
+import { addContact } from "@/lib/services/customers/add-contact";
+import { endMembership } from "@/lib/services/people/end-membership";
+import { inviteStaff } from "@/lib/services/people/invite-staff";
+import { unique, uniqueAddress } from "../factories/company";
+import { deadLetter } from "../factories/messages";
+import { newCustomer, newSite, newVisit, type World } from "../factories/world";
+
+const address = { street: "2 Test Street", city: "Chicago", state: "IL", postalCode: "60601" };
+
+const company = () => ({ ...address, name: unique("Company"), phone: "312-555-0100", zone: "America/Chicago" });
+
+let day = 0;
+/** A day of its own, so that samples never overlap. */
+const nextDay = () =>
+  `2027-${String(1 + Math.floor(++day / 27)).padStart(2, "0")}-${String(1 + (day % 27)).padStart(2, "0")}`;
+
+type Sample = (world: World) => unknown | Promise<unknown>;
+
+/** An input that works, for every verb and read, made of rows of the given world. */
+export const SAMPLES: Record<string, Sample> = {
+  "account.send-password-reset": (w) => ({ memberId: w.technician.memberId, email: w.technician.email }),
+  "account.send-sign-in-link": (w) => ({
+    memberId: w.technician.memberId,
+    email: w.technician.email,
+    url: "http://localhost/sign-in",
+  }),
+  "account.sign-out-everywhere": () => ({}),
+  "audit.list": () => ({}),
+  "company.found": () => ({
+    ...company(),
+    companyId: uuidv7(),
+    ownerName: unique("Owner"),
+    ownerEmail: uniqueAddress(),
+  }),
+  "company.frame": () => ({}),
+  "company.get": () => ({}),
+  "company.overview": () => ({}),
+  "company.update": company,
+  "contact.add": (w) => ({
+    customerId: w.customer.customerId,
+    name: unique("Contact"),
+    email: uniqueAddress(),
+    siteIds: [w.site.siteId],
+  }),
+  "contact.end": async (w) => ({ contactId: await freshContact(w) }),
+  "customer.create": () => ({ name: unique("Customer"), note: "internal" }),
+  "customer.get": (w) => ({ customerId: w.customer.customerId }),
+  "customer.list": () => ({}),
+  "customer.update": (w) => ({ customerId: w.customer.customerId, name: unique("Customer") }),
+  "delivery.list-dead": () => ({}),
+  "delivery.retry": async (w) => ({ outboxId: await deadLetter(w.company.companyId) }),
+  "field.day": () => ({}),
+  "find.all": () => ({ q: "Site" }),
+  "job.create": (w) => ({ siteId: w.site.siteId, kind: "test", title: unique("Job") }),
+  "job.list": () => ({}),
+  "password.reset": () => ({ password: "correct horse battery" }),
+  "person.accept-invitation": () => ({ password: "correct horse battery" }),
+  "person.change-role": async (w) => ({ memberId: await freshMember(w), role: "dispatcher" }),
+  "person.end": async (w) => ({ memberId: await freshMember(w) }),
+  "person.get": (w) => ({ memberId: w.technician.memberId }),
+  "person.invite": () => ({ name: unique("Person"), email: uniqueAddress(), role: "technician" }),
+  "person.invite-contact": async (w) => ({ contactId: await freshContact(w) }),
+  "person.list": () => ({}),
+  "person.record-license": (w) => ({
+    memberId: w.technician.memberId,
+    kind: "Fire alarm technician",
+    number: unique("IL"),
+    jurisdiction: "IL",
+    expiresOn: "2027-06-30",
+  }),
+  "person.resend-invitation": (w) => ({ memberId: w.technician.memberId }),
+  "person.restore": async (w) => {
+    const memberId = await freshMember(w);
+    await endMembership(w.owner.context, { memberId });
+    return { memberId };
+  },
+  "person.set-home": (w) => ({ memberId: w.technician.memberId, ...address }),
+  "portal.home": () => ({}),
+  "site.add-holder": async (w) => ({
+    siteId: w.site.siteId,
+    customerId: (await newCustomer(w.company)).customerId,
+    capacity: "occupant",
+    fromDate: "2026-01-01",
+  }),
+  "site.create": () => ({ ...address, name: unique("Site"), kind: "office", zone: "America/Chicago" }),
+  "site.end-holder": async (w) => ({
+    holderId: (await newSite(w.company, w.customer.customerId)).holderId,
+    toDate: "2026-12-31",
+  }),
+  "site.get": (w) => ({ siteId: w.site.siteId }),
+  "site.list": () => ({}),
+  "site.update": (w) => ({
+    ...address,
+    siteId: w.site.siteId,
+    name: w.site.name,
+    kind: "school",
+    zone: "America/Chicago",
+  }),
+  "visit.cancel": async (w) => {
+    const date = nextDay();
+    const { visitId } = await newVisit(w.company, w.site.siteId, [w.technician], `${date}T08:00`, `${date}T09:00`);
+    return { visitId };
+  },
+  "visit.plan": async (w) => {
+    const date = nextDay();
+    return {
+      jobId: w.visit.jobId,
+      startsLocal: `${date}T08:00`,
+      endsLocal: `${date}T12:00`,
+      crew: [w.technician.memberId],
+    };
+  },
+  "visit.run-sheet": () => ({ date: "2026-12-02" }),
+};
+
+const freshMember = async (w: World) =>
+  (await inviteStaff(w.owner.context, { name: unique("Person"), email: uniqueAddress(), role: "technician" })).memberId;
+
+const freshContact = async (w: World) =>
+  (
+    await addContact(w.owner.context, {
+      customerId: w.customer.customerId,
+      name: unique("Contact"),
+      email: uniqueAddress(),
+    })
+  ).contactId;
