@@ -1,37 +1,87 @@
 import { cva, type VariantProps } from "class-variance-authority";
 import { Slot } from "radix-ui";
 import { cn } from "./cn";
+import { Spinner } from "./spinner";
 
 const button = cva(
-  "inline-flex cursor-pointer items-center justify-center gap-2 rounded-md border font-semibold whitespace-nowrap disabled:cursor-not-allowed disabled:opacity-60",
+  "inline-flex cursor-pointer items-center justify-center gap-2 rounded-md border text-center font-semibold transition-colors disabled:cursor-not-allowed disabled:opacity-60 aria-busy:cursor-progress",
   {
     variants: {
       variant: {
-        primary: "border-settled bg-settled text-on-strong hover:brightness-110",
-        quiet: "border-field-line bg-surface text-text hover:border-text",
-        danger: "border-alert bg-surface text-alert hover:bg-alert hover:text-on-strong",
-        plain: "border-transparent bg-transparent text-text underline-offset-4 hover:underline",
+        primary: "border-settled bg-settled text-on-strong enabled:hover:brightness-110 [a&]:hover:brightness-110",
+        quiet: "border-field-line bg-surface text-text hover:border-text hover:bg-sunken",
+        danger:
+          "border-alert bg-surface text-alert enabled:hover:bg-alert enabled:hover:text-on-strong [a&]:hover:bg-alert [a&]:hover:text-on-strong",
+        plain: "border-transparent bg-transparent text-text hover:bg-sunken",
       },
       size: {
-        normal: "min-h-10 px-4 py-2",
-        small: "min-h-8 px-3 py-1 text-sm",
-        thumb: "min-h-12 px-5 py-3 text-base",
+        normal: "min-h-10 px-4 py-1.5",
+        small: "min-h-8 px-3 py-0.5 text-sm",
+        thumb: "min-h-12 px-5 py-2.5 text-base",
       },
+      square: { true: "aspect-square p-0", false: "" },
     },
-    defaultVariants: { variant: "quiet", size: "normal" },
+    defaultVariants: { variant: "quiet", size: "normal", square: false },
   },
 );
 
-type ButtonProps = React.ComponentProps<"button"> & VariantProps<typeof button> & { asChild?: boolean };
+type ButtonProps = React.ComponentProps<"button"> &
+  Omit<VariantProps<typeof button>, "square"> & {
+    /** Dresses its only child, usually a link. */
+    asChild?: boolean;
+    /** Working on it: cannot be pressed again, and says so. */
+    pending?: boolean;
+  };
 
-export function Button({ className, variant, size, asChild, type, ...props }: ButtonProps) {
-  const Part = asChild ? Slot.Root : "button";
+export function Button({
+  className,
+  variant,
+  size,
+  asChild,
+  pending,
+  type = "button",
+  disabled,
+  children,
+  ...props
+}: ButtonProps) {
+  const classes = cn(button({ variant, size }), className);
+  if (asChild) {
+    return (
+      <Slot.Root data-slot="button" className={classes} {...props}>
+        {children}
+      </Slot.Root>
+    );
+  }
   return (
-    <Part
+    <button
       data-slot="button"
-      className={cn(button({ variant, size }), className)}
-      {...(!asChild && { type: type ?? "button" })}
+      className={classes}
+      type={type}
+      disabled={disabled || pending}
+      aria-busy={pending || undefined}
       {...props}
-    />
+    >
+      {pending && <Spinner />}
+      {children}
+    </button>
+  );
+}
+
+type IconButtonProps = Omit<React.ComponentProps<"button">, "children" | "aria-label"> &
+  Omit<VariantProps<typeof button>, "square"> & { label: string; children: React.ReactNode };
+
+/** A picture alone; its label is read out and shown on hover. */
+export function IconButton({ label, variant = "plain", size, className, children, ...props }: IconButtonProps) {
+  return (
+    <button
+      data-slot="icon-button"
+      type="button"
+      aria-label={label}
+      title={label}
+      className={cn(button({ variant, size, square: true }), className)}
+      {...props}
+    >
+      {children}
+    </button>
   );
 }

@@ -3,7 +3,10 @@ import { cn } from "./cn";
 export function Table({ className, ...props }: React.ComponentProps<"table">) {
   return (
     <div className="overflow-x-auto rounded-lg border border-line bg-surface" data-slot="table">
-      <table className={cn("w-full border-collapse text-left", className)} {...props} />
+      <table
+        className={cn("w-full border-collapse text-left [&_tbody_tr:last-child>*]:border-b-0", className)}
+        {...props}
+      />
     </div>
   );
 }
@@ -11,7 +14,7 @@ export function Table({ className, ...props }: React.ComponentProps<"table">) {
 export const Th = ({ className, ...props }: React.ComponentProps<"th">) => (
   <th
     scope="col"
-    className={cn("border-b border-line px-3 py-2 text-sm font-semibold text-muted", className)}
+    className={cn("border-b border-line px-3 py-2 text-sm font-semibold whitespace-nowrap text-muted", className)}
     {...props}
   />
 );
