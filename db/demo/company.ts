@@ -2,7 +2,7 @@ import { addDays, calendarDate } from "@/lib/domain/shared/zone";
 import type { Context } from "@/lib/services/command";
 import { addContact } from "@/lib/services/customers/add-contact";
 import { createCustomer } from "@/lib/services/customers/create-customer";
-import { inviteContact } from "@/lib/services/people/invite-contact";
+import { inviteContact } from "@/lib/services/customers/invite-contact";
 import { inviteStaff } from "@/lib/services/people/invite-staff";
 import { recordLicense } from "@/lib/services/people/record-license";
 import { setHome } from "@/lib/services/people/set-home";

@@ -1,7 +1,7 @@
 import { addContact } from "@/lib/services/customers/add-contact";
 import { createCustomer } from "@/lib/services/customers/create-customer";
+import { inviteContact } from "@/lib/services/customers/invite-contact";
 import { createJob } from "@/lib/services/jobs/create-job";
-import { inviteContact } from "@/lib/services/people/invite-contact";
 import { addHolder } from "@/lib/services/sites/add-holder";
 import { createSite } from "@/lib/services/sites/create-site";
 import { planVisit } from "@/lib/services/visits/plan-visit";

@@ -15,8 +15,6 @@ export const InviteStaffInput = z.object({
   phone: optionalText(40),
 });
 
-export const InviteContactInput = z.object({ contactId: rowId });
-
 export const NewPasswordInput = z.object({ password: Password });
 
 export const ChangeRoleInput = z.object({ memberId: rowId, role: z.enum(STAFF_ROLES, { error: "Choose a role" }) });

@@ -1,15 +1,15 @@
-import { InviteContactInput } from "@/lib/domain/people/schemas";
+import { ContactRef } from "@/lib/domain/customers/schemas";
 import { AppError } from "@/lib/errors";
 import { command } from "@/lib/services/command";
-import { contactToChange } from "@/lib/services/customers/internal";
-import { addMember, userForAddress } from "./internal";
-import { sendInvitation } from "./invitation";
+import { addMember, userForAddress } from "@/lib/services/people/internal";
+import { sendInvitation } from "@/lib/services/people/invitation";
+import { contactToChange } from "./internal";
 
 /** Gives a customer's contact a sign-in of their own. */
 export const inviteContact = command({
   name: "person.invite-contact",
   needs: "person:write",
-  input: InviteContactInput,
+  input: ContactRef,
   async run({ tx, who, now }, { contactId }) {
     const contact = await contactToChange(tx, contactId);
     if (!contact.email) throw new AppError("blocked", "This contact has no e-mail address");
