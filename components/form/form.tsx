@@ -1,45 +1,64 @@
 "use client";
 
-import { useActionState, useEffect, useRef } from "react";
+import { startTransition, useActionState, useEffect, useRef } from "react";
 import { useFormStatus } from "react-dom";
+import { toast } from "sonner";
 import { Button } from "@/components/ui/button";
 import type { FormState } from "@/lib/domain/shared/form-state";
-import { FormStateContext } from "./field";
+import { ErrorSummary } from "./error-summary";
+import { FormStateContext } from "./form-context";
 
 export type FormAction = (state: FormState, form: FormData) => Promise<FormState>;
 
-type FormProps = Omit<React.ComponentProps<"form">, "action"> & { action: FormAction };
+type FormProps = Omit<React.ComponentProps<"form">, "action" | "onSubmit"> & {
+  action: FormAction;
+  /** How success is told: in the form, or passing by where the form goes away. */
+  say?: "here" | "toast";
+  onDone?: (state: FormState) => void;
+};
 
 /** A form that keeps what was typed, says what happened, and puts the cursor on the first field to mend. */
-export function Form({ action, children, ...props }: FormProps) {
-  const [state, submit] = useActionState(action, { ok: false });
+export function Form({ action, say = "here", onDone, children, ...props }: FormProps) {
+  const [state, send, pending] = useActionState(action, { ok: false });
   const form = useRef<HTMLFormElement>(null);
+  const summary = useRef<HTMLDivElement>(null);
+  const told = useRef<FormState>(state);
+
+  // Sent by hand, React does not empty the form; before the script arrives, the plain action does the work.
+  const submit = (event: React.SubmitEvent<HTMLFormElement>) => {
+    event.preventDefault();
+    if (pending) return;
+    const data = new FormData(event.currentTarget, event.nativeEvent.submitter);
+    startTransition(() => send(data));
+  };
+
   useEffect(() => {
-    if (state.at && !state.ok) form.current?.querySelector<HTMLElement>("[aria-invalid=true]")?.focus();
-  }, [state]);
+    if (told.current === state) return;
+    told.current = state;
+    if (state.ok) {
+      form.current?.reset();
+      if (say === "toast" && state.message) toast.success(state.message);
+      onDone?.(state);
+    } else {
+      const bad = form.current?.querySelector<HTMLElement>("[aria-invalid=true]");
+      (bad ?? summary.current)?.focus();
+    }
+  }, [state, say, onDone]);
+
   return (
     <FormStateContext value={state}>
-      {/* A new key takes the returned values as new defaults. */}
-      <form key={state.ok ? state.at : "same"} ref={form} action={submit} noValidate {...props}>
-        {state.message && (
-          <p
-            role={state.ok ? "status" : "alert"}
-            className={state.ok ? "text-settled font-semibold" : "text-alert font-semibold"}
-          >
-            {state.message}
-          </p>
-        )}
+      <form ref={form} action={send} onSubmit={submit} noValidate {...props}>
+        <ErrorSummary state={state} form={form} ref={summary} />
+        <p role="status" className="font-semibold text-settled empty:absolute">
+          {state.ok && say === "here" && state.message}
+        </p>
         {children}
       </form>
     </FormStateContext>
   );
 }
 
-export function SubmitButton({ children, ...props }: React.ComponentProps<typeof Button>) {
+export function SubmitButton(props: React.ComponentProps<typeof Button>) {
   const { pending } = useFormStatus();
-  return (
-    <Button type="submit" variant="primary" {...props} disabled={pending || props.disabled} aria-busy={pending}>
-      {pending ? "One moment…" : children}
-    </Button>
-  );
+  return <Button type="submit" variant="primary" pending={pending} {...props} />;
 }

@@ -4,7 +4,7 @@ import { cn } from "./cn";
 import { Spinner } from "./spinner";
 
 const button = cva(
-  "inline-flex cursor-pointer items-center justify-center gap-2 rounded-md border text-center font-semibold transition-colors disabled:cursor-not-allowed disabled:opacity-60 aria-busy:cursor-progress",
+  "inline-flex cursor-pointer items-center justify-center gap-2 rounded-md border text-center font-semibold transition-colors disabled:cursor-not-allowed disabled:opacity-60 aria-busy:cursor-progress aria-busy:opacity-75",
   {
     variants: {
       variant: {
@@ -40,14 +40,14 @@ export function Button({
   asChild,
   pending,
   type = "button",
-  disabled,
+  onClick,
   children,
   ...props
 }: ButtonProps) {
   const classes = cn(button({ variant, size }), className);
   if (asChild) {
     return (
-      <Slot.Root data-slot="button" className={classes} {...props}>
+      <Slot.Root data-slot="button" className={classes} onClick={onClick} {...props}>
         {children}
       </Slot.Root>
     );
@@ -57,8 +57,10 @@ export function Button({
       data-slot="button"
       className={classes}
       type={type}
-      disabled={disabled || pending}
+      // Not `disabled`: that would drop the keyboard's focus.
+      aria-disabled={pending || undefined}
       aria-busy={pending || undefined}
+      onClick={pending ? (event) => event.preventDefault() : onClick}
       {...props}
     >
       {pending && <Spinner />}
