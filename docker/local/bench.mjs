@@ -5,7 +5,7 @@ import { folderFor, root } from "./checkout.mjs";
 import { installSystemPackages } from "./debian.mjs";
 import { waitForLock } from "./locks.mjs";
 import { installPackages } from "./packages.mjs";
-import { freePort } from "./ports.mjs";
+import { reservePort } from "./ports.mjs";
 import { stopAll, stopOnSignals } from "./processes.mjs";
 import { builtPrograms, sourceEnv } from "./programs.mjs";
 import { Explained, sayFailure, step } from "./progress.mjs";
@@ -31,7 +31,7 @@ async function bench(name) {
   if (!process.env.DATABASE_URL) await installSystemPackages("postgres");
   const programs = builtPrograms(await currentBuild());
   const urls = await (await openServer("bench")).database("bench", { fresh: true });
-  const { address, inbox } = await bringUp({ purpose: "bench", urls, programs, port: await freePort() });
+  const { address, inbox } = await bringUp({ purpose: "bench", urls, programs, held: await reservePort() });
   const env = { ...urls, ...sourceEnv, APP_URL: address, MAIL_URL: inbox, STATE_FILE: stateFile("bench") };
   await step(`Measuring: ${name}`, async () => {
     await run(process.execPath, ["--import", "tsx", file, ...process.argv.slice(3)], { cwd: root, env, show: true });

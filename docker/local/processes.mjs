@@ -1,5 +1,5 @@
 import { spawn } from "node:child_process";
-import { createWriteStream } from "node:fs";
+import { createWriteStream, readFileSync } from "node:fs";
 import { join } from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
 import { say } from "./progress.mjs";
@@ -23,8 +23,11 @@ export function supervise(program) {
   const one = { program, log, child: undefined, stopping: false, failures: 0, exited: Promise.resolve() };
   supervised.push(one);
   launch(one);
-  return { stop: () => stop(one) };
+  const { logFile } = program;
+  return { stop: () => stop(one), failures: () => one.failures, logFile, logTail: () => tailOf(logFile) };
 }
+
+const tailOf = (file) => readFileSync(file, "utf8").trimEnd().split("\n").slice(-20).join("\n");
 
 function launch(one) {
   const { command, args, env, cwd, uid, gid, onLeash = true, onLaunch } = one.program;
@@ -34,7 +37,7 @@ function launch(one) {
     uid,
     gid,
     detached: true,
-    env: { ...process.env, ...env },
+    env: { ...process.env, LAUNCHER_PID: String(process.pid), ...env },
     stdio: ["ignore", "pipe", "pipe", ...(onLeash ? ["ipc"] : [])],
   });
   one.child = child;

@@ -27,7 +27,7 @@ export function builtPrograms(build) {
 
 /** The same from the sources, with hot reload. */
 export function sourcePrograms() {
-  const env = { ...sourceEnv, NODE_ENV: "development" };
+  const env = { ...sourceEnv, NODE_ENV: "development", NEXT_TELEMETRY_DISABLED: "1" };
   const from = (file) => ({ command: node, args: [...tsx, join(root, file)], cwd: root, env });
   const bin = (path, ...args) => ({
     command: node,

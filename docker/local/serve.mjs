@@ -3,7 +3,7 @@ import { folderFor, readState } from "./checkout.mjs";
 import { installSystemPackages } from "./debian.mjs";
 import { tryLock } from "./locks.mjs";
 import { installPackages } from "./packages.mjs";
-import { applicationPort } from "./ports.mjs";
+import { reserveApplicationPort } from "./ports.mjs";
 import { stopAll, stopOnSignals } from "./processes.mjs";
 import { say, sayFailure } from "./progress.mjs";
 import { interruptRuns } from "./run.mjs";
@@ -42,12 +42,12 @@ export async function serve({ command, purpose, programs, show }) {
     interruptRuns();
   });
   try {
-    const port = await applicationPort();
+    const held = await reserveApplicationPort();
     await prepare(purpose);
     const run = await programs();
     const server = await openServer(purpose);
     const urls = await server.database("coastdown");
-    sayReady(await bringUp({ purpose, urls, programs: run, port, show }));
+    sayReady(await bringUp({ purpose, urls, programs: run, held, show }));
   } catch (error) {
     sayFailure(error);
     await stopAll();

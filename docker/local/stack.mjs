@@ -10,6 +10,7 @@ import { Explained, step } from "./progress.mjs";
 import { run } from "./run.mjs";
 
 const readyPatience = 90_000;
+const triesToStart = 3;
 
 export const stateFile = (purpose) => join(folderFor(purpose), "state.json");
 
@@ -44,9 +45,9 @@ async function startMail(purpose) {
   writeState(join(folder, "mail-ports.json"), ports);
   const main = join(import.meta.dirname, "mail/main.mjs");
   const options = ["--smtp", ports.smtp, "--http", ports.http, "--dir", join(folder, "mail")].map(String);
-  start(purpose, "mail", { command: process.execPath, args: [main, ...options], cwd: folder });
+  const mail = start(purpose, "mail", { command: process.execPath, args: [main, ...options], cwd: folder });
   const inbox = `http://localhost:${ports.http}`;
-  await untilAnswering("mail", `${inbox}/api/messages`);
+  await untilAnswering(mail, `${inbox}/api/messages`);
   return { smtpUrl: `smtp://127.0.0.1:${ports.smtp}`, inbox };
 }
 
@@ -55,31 +56,35 @@ function start(purpose, name, program, show = false) {
   return supervise({ ...program, name, logFile, show, onLaunch: (pid) => note(purpose, { [name]: pid }) });
 }
 
-async function untilAnswering(name, url) {
+async function untilAnswering(program, url) {
   let last = "";
-  for (const end = Date.now() + readyPatience; Date.now() < end; await pause(100)) {
+  for (
+    const end = Date.now() + readyPatience;
+    Date.now() < end && program.failures() < triesToStart;
+    await pause(100)
+  ) {
     try {
-      const answer = await fetch(url, { signal: AbortSignal.timeout(10_000) });
+      const answer = await fetch(url, { signal: AbortSignal.timeout(30_000) });
       if (answer.ok) return;
       last = `${answer.status} ${await answer.text()}`;
     } catch (error) {
       last = error.cause?.code ?? error.message;
     }
   }
-  throw new Explained(`The ${name} does not answer at ${url}: ${last}`);
+  throw new Explained(`${program.logTail()}\nNothing good from ${url}: ${last}\nLog: ${program.logFile}`);
 }
 
 const once = (program, env) =>
   run(program.command, program.args, { cwd: program.cwd, env: { ...program.env, ...env } });
 
 /** Brings up everything that a user of the product meets; answers where it is and what the demo loader said. */
-export async function bringUp({ purpose, urls, programs, port, show = false }) {
+export async function bringUp({ purpose, urls, programs, held, show = false }) {
   await step("Applying migrations", async () => {
     const { stdout } = await once(programs.migrate, { DATABASE_OWNER_URL: urls.DATABASE_OWNER_URL });
     return stdout.trim().split("\n").at(-1);
   });
   const { smtpUrl, inbox } = await step("Starting the mail stand-in", () => startMail(purpose));
-  const address = process.env.APP_URL ?? `http://localhost:${port}`;
+  const address = process.env.APP_URL ?? `http://localhost:${held.port}`;
   const env = {
     DATABASE_URL: urls.DATABASE_URL,
     DATABASE_OWNER_URL: undefined,
@@ -92,8 +97,9 @@ export async function bringUp({ purpose, urls, programs, port, show = false }) {
     env.DEMO === "on" ? await step("Loading the demo company", () => once(programs.demo, env)) : { stdout: "" };
   await step("Starting the application and its worker", async () => {
     start(purpose, "worker", withEnv(programs.worker, env), show);
-    start(purpose, "app", withEnv(programs.app(port), env), show);
-    await untilAnswering("application", `http://localhost:${port}/api/health`);
+    await held.release();
+    const app = start(purpose, "app", withEnv(programs.app(held.port), env), show);
+    await untilAnswering(app, `http://localhost:${held.port}/api/health`);
   });
   note(purpose, { address, inbox });
   return { address, inbox, demo: demo.stdout.trimEnd(), env };

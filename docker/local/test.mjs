@@ -6,7 +6,7 @@ import { browserProgram, installSystemPackages } from "./debian.mjs";
 import { waitForLock } from "./locks.mjs";
 import { check, interruptChecks, playwrightCounts, sayOutcome, vitestCounts } from "./outcome.mjs";
 import { installPackages } from "./packages.mjs";
-import { freePort } from "./ports.mjs";
+import { reservePort } from "./ports.mjs";
 import { stopAll, stopOnSignals } from "./processes.mjs";
 import { builtPrograms } from "./programs.mjs";
 import { interruptRuns, run } from "./run.mjs";
@@ -57,7 +57,7 @@ async function endToEnd(server) {
   const built = await check("Production build and stack", async () => {
     urls = await server.database("e2e", { fresh: true });
     const programs = builtPrograms(await currentBuild());
-    stack = await bringUp({ purpose: "test", urls, programs, port: await freePort() });
+    stack = await bringUp({ purpose: "test", urls, programs, held: await reservePort() });
   });
   if (!built) return;
   const env = {
