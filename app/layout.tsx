@@ -1,5 +1,6 @@
 import type { Metadata, Viewport } from "next";
 import { ThemeScript } from "@/components/layout/theme";
+import { Toaster } from "@/components/ui/toaster";
 import "./globals.css";
 import { Providers } from "./providers";
 
@@ -8,7 +9,7 @@ export const metadata: Metadata = {
   description: "Fan shutdown tests: booked, proven, left as found, and paid.",
 };
 
-export const viewport: Viewport = { width: "device-width", initialScale: 1 };
+export const viewport: Viewport = { width: "device-width", initialScale: 1, viewportFit: "cover" };
 
 export default function RootLayout({ children }: { children: React.ReactNode }) {
   return (
@@ -18,6 +19,7 @@ export default function RootLayout({ children }: { children: React.ReactNode }) 
       </head>
       <body>
         <Providers>{children}</Providers>
+        <Toaster />
       </body>
     </html>
   );

@@ -1,36 +1,19 @@
 "use client";
 
-const CHOICES = [
-  { value: "", word: "As the device" },
-  { value: "light", word: "Light" },
-  { value: "dark", word: "Dark" },
-] as const;
+import { Choice, ChoiceGroup, Radio } from "@/components/ui/choice";
+import { THEMES } from "./theme";
+import { useTheme } from "./use-theme";
 
-export function ThemeChoice() {
-  const choose = (value: string) => {
-    if (value) {
-      localStorage.setItem("theme", value);
-      document.documentElement.dataset.theme = value;
-    } else {
-      localStorage.removeItem("theme");
-      delete document.documentElement.dataset.theme;
-    }
-  };
+export function ThemeChoice({ legend = "Appearance" }: { legend?: string }) {
+  const [theme, choose] = useTheme();
   return (
-    <fieldset className="flex flex-wrap gap-4">
-      <legend className="mb-1 font-semibold">Appearance</legend>
-      {CHOICES.map(({ value, word }) => (
-        <label key={word} className="flex min-h-8 items-center gap-2">
-          <input
-            type="radio"
-            name="theme"
-            value={value}
-            onChange={() => choose(value)}
-            className="size-4 accent-settled"
-          />
+    <ChoiceGroup legend={legend} className="flex flex-wrap">
+      {THEMES.map(({ value, word }) => (
+        <Choice key={value}>
+          <Radio name="theme" value={value} checked={value === theme} onChange={() => choose(value)} />
           {word}
-        </label>
+        </Choice>
       ))}
-    </fieldset>
+    </ChoiceGroup>
   );
 }
