@@ -26,6 +26,7 @@ export default defineConfig({
   fullyParallel: true,
   forbidOnly: true,
   // The machine is small and the whole product runs beside the browsers.
+  timeout: 90_000,
   expect: { timeout: 15_000 },
   reporter: [["list"], ["json", { outputFile: process.env.TEST_REPORT ?? "test-results/playwright.json" }]],
   use: {

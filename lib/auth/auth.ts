@@ -1,12 +1,13 @@
 import "server-only";
 import { DrizzleAdapter } from "@auth/drizzle-adapter";
 import { headers } from "next/headers";
-import NextAuth from "next-auth";
+import NextAuth, { CredentialsSignin } from "next-auth";
 import type { EmailConfig } from "next-auth/providers";
 import Credentials from "next-auth/providers/credentials";
 import { database } from "@/db/client";
 import { accounts, users, verificationTokens } from "@/db/schema/identity";
 import { env } from "@/lib/env";
+import { log } from "@/lib/log";
 import { requestAccess } from "./access-requests";
 import { passwordMatches } from "./password";
 import { endSession, membershipsOf, SESSION_DAYS, startSession, storedPassword } from "./sessions";
@@ -53,6 +54,10 @@ const password = Credentials({
 export const { handlers, auth, signIn, signOut } = NextAuth(() => ({
   secret: env().AUTH_SECRET,
   trustHost: true,
+  logger: {
+    // A wrong password is an answer, not an error.
+    error: (error) => (error instanceof CredentialsSignin ? undefined : log().error({ err: error }, "sign-in failed")),
+  },
   adapter: DrizzleAdapter(database(), {
     usersTable: users,
     accountsTable: accounts,

@@ -1,4 +1,3 @@
-import { DrizzleQueryError } from "drizzle-orm";
 import { AppError } from "@/lib/errors";
 
 type Refusal = { code: string; constraint_name?: string };
@@ -29,7 +28,8 @@ const words = (refusal: Refusal, otherwise: string) => CONSTRAINT_WORDS[refusal.
 
 /** The database's refusals in our own vocabulary; what is not a refusal stays what it was. */
 export function translated(error: unknown): unknown {
-  const cause = error instanceof DrizzleQueryError ? error.cause : error;
+  // By shape, not by class: pages and routes are bundled apart and share one pool.
+  const cause = error instanceof Error && error.cause ? error.cause : error;
   if (cause === null || typeof cause !== "object" || !("code" in cause)) return error;
   const refusal = cause as Refusal;
   return CODES[refusal.code]?.(refusal) ?? error;

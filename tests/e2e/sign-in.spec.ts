@@ -1,5 +1,5 @@
-import { expect, test } from "@playwright/test";
 import { FIRST_SCREEN, ROLES } from "../../lib/domain/shared/roles";
+import { expect, test } from "./fixtures";
 import { addressOfRole, signInAs } from "./people";
 
 for (const role of ROLES) {
