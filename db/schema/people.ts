@@ -6,7 +6,8 @@ import { companies } from "./company";
 import { contacts } from "./customers";
 import { users } from "./identity";
 
-const STAFF = "(select app.is_staff())";
+/** Technicians know who works here; a customer's people they know as contacts of their sites. */
+const COLLEAGUE = "(select app.is_technician()) and contact_id is null";
 const SELF = "member_id = (select app.member_id())";
 
 /** A person's place in one company. Ended, never deleted: history names people. */
@@ -29,7 +30,7 @@ export const members = pgTable(
     unique("members_user_unique").on(t.companyId, t.userId),
     foreignKey({ columns: [t.companyId, t.contactId], foreignColumns: [contacts.companyId, contacts.id] }),
     check("members_contact_of_customer", sql`(${t.role} = 'customer') = (${t.contactId} is not null)`),
-    mayRead(either(STAFF, "id = (select app.member_id())", "id in (select app.my_crew_ids())")),
+    mayRead(either(OFFICE, COLLEAGUE, "id = (select app.member_id())", "id in (select app.my_crew_ids())")),
     mayAdd(either(OWNER, "(select app.is_operator())")),
     mayChange(either(OWNER, "(select app.is_link()) and id = (select app.member_id())")),
     gate(),

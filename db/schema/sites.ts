@@ -18,6 +18,8 @@ import {
 import { companies } from "./company";
 import { contacts, customers } from "./customers";
 
+const TECHNICIAN_OF_SITE = `(select app.is_technician()) and ${MY_SITE()}`;
+
 export const sites = pgTable(
   "sites",
   {
@@ -50,7 +52,7 @@ export const siteAccess = pgTable(
   (t) => [
     primaryKey({ columns: [t.companyId, t.siteId] }),
     foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
-    mayRead(either(OFFICE, `(select app.is_technician()) and ${MY_SITE()}`)),
+    mayRead(either(OFFICE, TECHNICIAN_OF_SITE)),
     mayAdd(OFFICE),
     mayChange(OFFICE),
     mayRemove(OFFICE),
@@ -78,9 +80,7 @@ export const siteHolders = pgTable(
     foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
     foreignKey({ columns: [t.companyId, t.customerId], foreignColumns: [customers.companyId, customers.id] }),
     check("site_holders_dates", sql`${t.toDate} is null or ${t.toDate} >= ${t.fromDate}`),
-    mayRead(
-      either(OFFICE, "customer_id = (select app.customer_id())", `(select app.is_technician()) and ${MY_SITE()}`),
-    ),
+    mayRead(either(OFFICE, `customer_id = (select app.customer_id()) and ${MY_SITE()}`, TECHNICIAN_OF_SITE)),
     mayAdd(OFFICE),
     mayChange(OFFICE),
     gate(),
@@ -95,7 +95,7 @@ export const contactSites = pgTable(
     primaryKey({ columns: [t.companyId, t.contactId, t.siteId] }),
     foreignKey({ columns: [t.companyId, t.contactId], foreignColumns: [contacts.companyId, contacts.id] }),
     foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
-    mayRead(either(OFFICE, "contact_id = (select app.contact_id())")),
+    mayRead(either(OFFICE, "contact_id = (select app.contact_id())", TECHNICIAN_OF_SITE)),
     mayAdd(OFFICE),
     mayRemove(OFFICE),
     gate(),

@@ -1,0 +1,4 @@
+ALTER POLICY "read" ON "members" TO coastdown_app USING (company_id = (select app.company_id()) and ((select app.is_office()) or (select app.is_technician()) and contact_id is null or id = (select app.member_id()) or id in (select app.my_crew_ids())));--> statement-breakpoint
+ALTER POLICY "read" ON "contact_sites" TO coastdown_app USING (company_id = (select app.company_id()) and ((select app.is_office()) or contact_id = (select app.contact_id()) or (select app.is_technician()) and site_id in (select app.my_site_ids())));--> statement-breakpoint
+ALTER POLICY "read" ON "site_holders" TO coastdown_app USING (company_id = (select app.company_id()) and ((select app.is_office()) or customer_id = (select app.customer_id()) and site_id in (select app.my_site_ids()) or (select app.is_technician()) and site_id in (select app.my_site_ids())));--> statement-breakpoint
+drop function app.is_staff();
