@@ -6,6 +6,7 @@ import type { EmailConfig } from "next-auth/providers";
 import Credentials from "next-auth/providers/credentials";
 import { database } from "@/db/client";
 import { accounts, users, verificationTokens } from "@/db/schema/identity";
+import { SIGN_IN_LINK_MINUTES } from "@/lib/domain/shared/link-validity";
 import { env } from "@/lib/env";
 import { log } from "@/lib/log";
 import { requestAccess } from "./access-requests";
@@ -17,8 +18,6 @@ declare module "next-auth" {
     sid?: string;
   }
 }
-
-const LINK_MINUTES = 15;
 
 /** A page of ours stands between the letter and Auth.js: opening an address never spends it, pressing a button does. */
 function confirmAddress(callback: string): string {
@@ -33,7 +32,7 @@ const emailLink: EmailConfig = {
   type: "email",
   name: "E-mail",
   from: "",
-  maxAge: LINK_MINUTES * 60,
+  maxAge: SIGN_IN_LINK_MINUTES * 60,
   options: {},
   /** Written alike for every address; the worker finds out whether anybody is there. */
   async sendVerificationRequest({ identifier, url }) {

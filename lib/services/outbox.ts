@@ -9,8 +9,8 @@ export async function enqueue(tx: Tx, who: Entered, { event, ...payload }: Domai
   await tx.insert(outbox).values({ companyId: who.companyId, event, payload });
 }
 
-/** An e-mail to be rendered and sent by the worker. `url` is kept apart and goes once it is sent. */
-export async function mail(tx: Tx, who: Entered, to: string, letter: MailTemplate, url?: string): Promise<void> {
+/** An e-mail to be rendered and sent by the worker. `url`, where it leads, is kept apart and goes once it is sent. */
+export async function mail(tx: Tx, who: Entered, to: string, letter: MailTemplate, url: string): Promise<void> {
   const id = uuidv7();
   const { template, ...props } = letter;
   await tx.insert(messages).values({
@@ -21,6 +21,6 @@ export async function mail(tx: Tx, who: Entered, to: string, letter: MailTemplat
     props,
     messageId: `<${id}@coastdown.example>`,
   });
-  if (url) await tx.insert(messageSecrets).values({ companyId: who.companyId, messageId: id, url });
+  await tx.insert(messageSecrets).values({ companyId: who.companyId, messageId: id, url });
   await enqueue(tx, who, { event: "message.written", messageId: id });
 }

@@ -26,7 +26,11 @@ const RULES: Rule[] = [
     own: ["lib/env.ts", "lib/log.ts", "lib/errors.ts", "lib/auth/actor.ts", "lib/domain"],
     never: ["next", "react"],
   },
-  { folder: "lib/auth", own: ["db", "lib/env.ts", "lib/errors.ts", "lib/domain/shared"], never: ["react"] },
+  {
+    folder: "lib/auth",
+    own: ["db", "lib/env.ts", "lib/log.ts", "lib/errors.ts", "lib/domain/shared"],
+    never: ["react"],
+  },
   { folder: "lib/services/demo-accounts.ts", own: ["db/demo/accounts.ts", "lib/env.ts"], packages: [] },
   {
     folder: "lib/services",

@@ -28,7 +28,7 @@ export default async function setup(project: TestProject) {
   for (const name of names) await owner.unsafe(`create database ${name} template ${template}`);
   project.provide("databases", names);
   return async () => {
-    for (const name of [...names, template]) await owner.unsafe(`drop database if exists ${name} with (force)`);
+    for (const name of [...names, template]) await owner.unsafe(`drop database if exists ${name}`);
     await owner.end();
   };
 }

@@ -1,4 +1,4 @@
-import { inject } from "vitest";
+import { afterAll, inject } from "vitest";
 
 const databases = inject("databases");
 const mine = databases[(Number(process.env.VITEST_POOL_ID ?? 1) - 1) % databases.length];
@@ -12,4 +12,11 @@ Object.assign(process.env, {
   SMTP_URL: "smtp://127.0.0.1:1025",
   NODE_ENV: "test",
   LOG_LEVEL: "silent",
+});
+
+/** Each test file has modules, and so a pool, of its own. */
+afterAll(async () => {
+  const kept = globalThis as { coastdownDatabase?: { $client: { end(): Promise<void> } } };
+  await kept.coastdownDatabase?.$client.end();
+  delete kept.coastdownDatabase;
 });

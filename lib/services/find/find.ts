@@ -1,13 +1,14 @@
-import { and, asc, desc, eq, gte, ilike, inArray, isNull, lt, or, sql } from "drizzle-orm";
+import { and, asc, desc, eq, gte, ilike, inArray, isNull, lt, ne, or, sql } from "drizzle-orm";
 import { z } from "zod";
 import type { Tx } from "@/db/client";
 import { contacts, customers } from "@/db/schema/customers";
 import { jobs } from "@/db/schema/jobs";
 import { members } from "@/db/schema/people";
-import { siteHolders, sites } from "@/db/schema/sites";
+import { sites } from "@/db/schema/sites";
 import { visits } from "@/db/schema/visits";
 import { query } from "@/lib/services/command";
 import { containing } from "@/lib/services/paging";
+import { contactsOfSites } from "@/lib/services/sites/site-contacts";
 
 const MOST = 8;
 
@@ -55,7 +56,7 @@ export const find = query({
       people: await tx
         .select({ id: members.id, name: members.name, role: members.role })
         .from(members)
-        .where(and(ilike(members.name, words), isNull(members.endedAt)))
+        .where(and(ilike(members.name, words), ne(members.role, "customer"), isNull(members.endedAt)))
         .orderBy(members.name)
         .limit(MOST),
     };
@@ -83,14 +84,7 @@ async function foundSites(tx: Tx, words: string, now: Date) {
     .from(visits)
     .where(and(standing, gte(visits.startsAt, now)))
     .orderBy(visits.siteId, asc(visits.startsAt));
-  const people = await tx
-    .selectDistinct({ siteId: siteHolders.siteId, name: contacts.name, phone: contacts.phone })
-    .from(siteHolders)
-    .innerJoin(
-      contacts,
-      and(eq(contacts.companyId, siteHolders.companyId), eq(contacts.customerId, siteHolders.customerId)),
-    )
-    .where(and(inArray(siteHolders.siteId, ids), isNull(contacts.endedAt)));
+  const people = await contactsOfSites(tx, ids, now);
   return found.map((site) => ({
     ...site,
     lastVisit: last.find((visit) => visit.siteId === site.id)?.startsLocal ?? null,

@@ -3,12 +3,11 @@ import type { Tx } from "@/db/client";
 import { companies } from "@/db/schema/company";
 import { members } from "@/db/schema/people";
 import type { Entered } from "@/lib/auth/actor";
+import { INVITATION_DAYS } from "@/lib/domain/shared/link-validity";
 import { paths } from "@/lib/domain/shared/paths";
 import { ROLE_WORDS, type Role } from "@/lib/domain/shared/roles";
 import { makeLink, withdrawLinks } from "@/lib/services/links";
 import { mail } from "@/lib/services/outbox";
-
-const DAYS_VALID = 14;
 
 export const daysFrom = (now: Date, days: number): Date => new Date(now.getTime() + days * 86_400_000);
 
@@ -23,7 +22,7 @@ export async function sendInvitation(tx: Tx, who: Entered, invited: Invited, now
   const token = await makeLink(tx, who, {
     grant: "invitation:accept",
     subjectId: invited.memberId,
-    expiresAt: daysFrom(now, DAYS_VALID),
+    expiresAt: daysFrom(now, INVITATION_DAYS),
   });
   const companyName = company?.name ?? "";
   await mail(

@@ -3,6 +3,7 @@ import { companies } from "@/db/schema/company";
 import { memberDetails, members } from "@/db/schema/people";
 import { hashPassword } from "@/lib/auth/password";
 import { NewPasswordInput } from "@/lib/domain/people/schemas";
+import { paths } from "@/lib/domain/shared/paths";
 import { notFound } from "@/lib/errors";
 import { command } from "@/lib/services/command";
 import { spendLink } from "@/lib/services/links";
@@ -20,7 +21,8 @@ export const resetPassword = command({
     const [company] = await tx.select({ name: companies.name }).from(companies);
     if (!member?.userId || !details || !company) throw notFound("person");
     await setPassword(tx, member.userId, await hashPassword(password), now);
-    await mail(tx, who, details.email, { template: "password-changed", companyName: company.name, name: member.name });
+    const letter = { template: "password-changed", companyName: company.name, name: member.name } as const;
+    await mail(tx, who, details.email, letter, paths.forgot);
     return { result: null, audit: { entity: "person", entityId: memberId } };
   },
 });

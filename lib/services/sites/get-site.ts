@@ -1,18 +1,19 @@
-import { and, asc, desc, eq, isNull } from "drizzle-orm";
+import { and, asc, desc, eq } from "drizzle-orm";
 import { z } from "zod";
-import { contacts, customers } from "@/db/schema/customers";
+import { customers } from "@/db/schema/customers";
 import { jobs } from "@/db/schema/jobs";
 import { siteAccess, siteHolders } from "@/db/schema/sites";
 import { visits } from "@/db/schema/visits";
 import { rowId } from "@/lib/domain/shared/inputs";
 import { query } from "@/lib/services/command";
 import { siteById } from "./internal";
+import { contactsOfSites } from "./site-contacts";
 
 export const getSite = query({
   name: "site.get",
   needs: "site:read",
   input: z.object({ siteId: rowId }),
-  async run({ tx }, { siteId }) {
+  async run({ tx, now }, { siteId }) {
     const site = await siteById(tx, siteId);
     const [access] = await tx.select().from(siteAccess).where(eq(siteAccess.siteId, siteId));
     const holders = await tx
@@ -24,21 +25,6 @@ export const getSite = query({
       )
       .where(eq(siteHolders.siteId, siteId))
       .orderBy(asc(siteHolders.capacity), desc(siteHolders.fromDate));
-    const people = await tx
-      .selectDistinct({
-        id: contacts.id,
-        name: contacts.name,
-        title: contacts.title,
-        phone: contacts.phone,
-        email: contacts.email,
-      })
-      .from(contacts)
-      .innerJoin(
-        siteHolders,
-        and(eq(siteHolders.companyId, contacts.companyId), eq(siteHolders.customerId, contacts.customerId)),
-      )
-      .where(and(eq(siteHolders.siteId, siteId), isNull(contacts.endedAt)))
-      .orderBy(contacts.name);
     const history = await tx
       .select({ visit: visits, job: { id: jobs.id, number: jobs.number, title: jobs.title, kind: jobs.kind } })
       .from(visits)
@@ -46,6 +32,12 @@ export const getSite = query({
       .where(eq(visits.siteId, siteId))
       .orderBy(desc(visits.startsAt))
       .limit(20);
-    return { ...site, accessNote: access?.note ?? null, holders, contacts: people, visits: history };
+    return {
+      ...site,
+      accessNote: access?.note ?? null,
+      holders,
+      contacts: await contactsOfSites(tx, [siteId], now),
+      visits: history,
+    };
   },
 });

@@ -1,11 +1,11 @@
-import { and, eq, inArray, isNull } from "drizzle-orm";
+import { inArray } from "drizzle-orm";
 import { z } from "zod";
 import { companies } from "@/db/schema/company";
-import { contacts } from "@/db/schema/customers";
-import { siteAccess, siteHolders } from "@/db/schema/sites";
+import { siteAccess } from "@/db/schema/sites";
 import { addDays, calendarDate, startOfDate } from "@/lib/domain/shared/zone";
 import { AppError, notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
+import { contactsOfSites } from "@/lib/services/sites/site-contacts";
 import { visitsBetween } from "./internal";
 
 const DAYS_SHOWN = 7;
@@ -31,22 +31,7 @@ export const getFieldDay = query({
     const siteIds = [...new Set(mine.map((visit) => visit.site.id))];
     const notes =
       siteIds.length === 0 ? [] : await tx.select().from(siteAccess).where(inArray(siteAccess.siteId, siteIds));
-    const people =
-      siteIds.length === 0
-        ? []
-        : await tx
-            .selectDistinct({
-              siteId: siteHolders.siteId,
-              name: contacts.name,
-              title: contacts.title,
-              phone: contacts.phone,
-            })
-            .from(siteHolders)
-            .innerJoin(
-              contacts,
-              and(eq(contacts.companyId, siteHolders.companyId), eq(contacts.customerId, siteHolders.customerId)),
-            )
-            .where(and(inArray(siteHolders.siteId, siteIds), isNull(contacts.endedAt)));
+    const people = await contactsOfSites(tx, siteIds, now);
     return {
       company,
       today,
