@@ -24,6 +24,7 @@ async function enter(tx: Tx, actor: Actor): Promise<Entered> {
       if (!row) break;
       return {
         kind: "person",
+        sessionId: actor.sessionId,
         companyId: row.company_id,
         userId: row.user_id,
         memberId: row.member_id,

@@ -14,6 +14,7 @@ export type Actor =
 export type Entered =
   | {
       kind: "person";
+      sessionId: string;
       companyId: string;
       userId: string;
       memberId: string;

@@ -18,9 +18,13 @@ import { retryDeadLetter } from "./messages/retry-dead-letter";
 import { sendPasswordReset } from "./messages/send-password-reset";
 import { sendSignInLink } from "./messages/send-sign-in-link";
 import { acceptInvitation } from "./people/accept-invitation";
+import { changePassword } from "./people/change-password";
 import { changeRole } from "./people/change-role";
 import { endMembership } from "./people/end-membership";
+import { endSession } from "./people/end-session";
+import { enterCompany } from "./people/enter-company";
 import { foundCompany } from "./people/found-company";
+import { getAccount } from "./people/get-account";
 import { getPerson } from "./people/get-person";
 import { inviteStaff } from "./people/invite-staff";
 import { listPeople } from "./people/list-people";
@@ -56,8 +60,11 @@ export const COMMANDS: readonly Verb[] = [
   sendPasswordReset,
   sendSignInLink,
   acceptInvitation,
+  changePassword,
   changeRole,
   endMembership,
+  endSession,
+  enterCompany,
   inviteContact,
   inviteStaff,
   recordLicense,
@@ -83,6 +90,7 @@ export const QUERIES: readonly Verb[] = [
   find,
   listJobs,
   listDeadLetters,
+  getAccount,
   getPerson,
   listPeople,
   getSite,

@@ -1,8 +1,9 @@
 import { v7 as uuidv7 } from "uuid";
+import type { Actor } from "@/lib/auth/actor";
 import { addContact } from "@/lib/services/customers/add-contact";
 import { endMembership } from "@/lib/services/people/end-membership";
 import { inviteStaff } from "@/lib/services/people/invite-staff";
-import { unique, uniqueAddress } from "../factories/company";
+import { givePassword, secondSession, unique, uniqueAddress } from "../factories/company";
 import { deadLetter } from "../factories/messages";
 import { newCustomer, newSite, newVisit, type World } from "../factories/world";
 
@@ -15,10 +16,19 @@ let day = 0;
 const nextDay = () =>
   `2027-${String(1 + Math.floor(++day / 27)).padStart(2, "0")}-${String(1 + (day % 27)).padStart(2, "0")}`;
 
-type Sample = (world: World) => unknown | Promise<unknown>;
+type Sample = (world: World, caller?: Actor) => unknown | Promise<unknown>;
 
-/** An input that works, for every verb and read, made of rows of the given world. */
+const PASSWORD = "correct horse battery";
+
+/** An input that works, for every verb and read, made of rows of the given world, and of the caller's own where those count. */
 export const SAMPLES: Record<string, Sample> = {
+  "account.change-password": async (w, caller) => {
+    await givePassword(caller ?? w.owner.actor, PASSWORD);
+    return { currentPassword: PASSWORD, password: "another quiet evening" };
+  },
+  "account.end-session": async (w, caller) => ({ sessionId: await secondSession(caller ?? w.owner.actor) }),
+  "account.enter-company": (w) => ({ companyId: w.company.companyId }),
+  "account.get": () => ({}),
   "account.send-password-reset": (w) => ({ memberId: w.technician.memberId, email: w.technician.email }),
   "account.send-sign-in-link": (w) => ({
     memberId: w.technician.memberId,
@@ -54,8 +64,8 @@ export const SAMPLES: Record<string, Sample> = {
   "find.all": () => ({ q: "Site" }),
   "job.create": (w) => ({ siteId: w.site.siteId, kind: "test", title: unique("Job") }),
   "job.list": () => ({}),
-  "password.reset": () => ({ password: "correct horse battery" }),
-  "person.accept-invitation": () => ({ password: "correct horse battery" }),
+  "password.reset": () => ({ password: PASSWORD }),
+  "person.accept-invitation": () => ({ password: PASSWORD }),
   "person.change-role": async (w) => ({ memberId: await freshMember(w), role: "dispatcher" }),
   "person.end": async (w) => ({ memberId: await freshMember(w) }),
   "person.get": (w) => ({ memberId: w.technician.memberId }),

@@ -3,10 +3,11 @@ import { and, desc, eq } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
 import { database } from "@/db/client";
 import { asActor } from "@/db/door";
-import { sessions, users } from "@/db/schema/identity";
+import { passwords, sessions, users } from "@/db/schema/identity";
 import { messageSecrets, messages } from "@/db/schema/messages";
 import { members } from "@/db/schema/people";
 import type { Actor } from "@/lib/auth/actor";
+import { hashPassword } from "@/lib/auth/password";
 import type { StaffRole } from "@/lib/domain/shared/roles";
 import type { Context } from "@/lib/services/command";
 import { foundCompany } from "@/lib/services/people/found-company";
@@ -14,7 +15,7 @@ import { inviteStaff } from "@/lib/services/people/invite-staff";
 
 /** A Tuesday noon in Chicago; tests of what depends on dates count from here. */
 export const NOW = new Date("2026-12-01T18:00:00Z");
-const HOUR_MS = 3_600_000;
+const DAY_MS = 86_400_000;
 
 let counter = 0;
 /** Unlike any other in this run, so that test files and tests share nothing. */
@@ -35,9 +36,34 @@ export async function sessionOf(companyId: string, memberId: string): Promise<Ex
       userId,
       companyId,
       sessionVersion: user?.sessionVersion ?? 0,
-      expiresAt: new Date(Date.now() + HOUR_MS),
+      expiresAt: new Date(Date.now() + 30 * DAY_MS),
     });
   return { kind: "session", sessionId: id };
+}
+
+async function sessionRow(actor: Actor) {
+  const sessionId = actor.kind === "session" ? actor.sessionId : "";
+  const [row] = await database().select().from(sessions).where(eq(sessions.id, sessionId));
+  if (!row) throw new Error("nobody is signed in");
+  return row;
+}
+
+/** The same person, signed in once more. */
+export async function secondSession(actor: Actor): Promise<string> {
+  const id = uuidv7();
+  await database()
+    .insert(sessions)
+    .values({ ...(await sessionRow(actor)), id });
+  return id;
+}
+
+export async function givePassword(actor: Actor, password: string): Promise<void> {
+  const { userId } = await sessionRow(actor);
+  const hash = await hashPassword(password);
+  await database()
+    .insert(passwords)
+    .values({ userId, hash })
+    .onConflictDoUpdate({ target: passwords.userId, set: { hash } });
 }
 
 async function userOf(companyId: string, memberId: string): Promise<string> {

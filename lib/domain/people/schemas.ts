@@ -17,6 +17,11 @@ export const InviteStaffInput = z.object({
 
 export const NewPasswordInput = z.object({ password: Password });
 
+export const ChangePasswordInput = z.object({
+  currentPassword: z.string({ error: "Type your password" }).min(1, "Type your password").max(200),
+  password: Password,
+});
+
 export const ChangeRoleInput = z.object({ memberId: rowId, role: z.enum(STAFF_ROLES, { error: "Choose a role" }) });
 
 export const MemberRef = z.object({ memberId: rowId });

@@ -1,5 +1,6 @@
 /** Every address of the product, built in one place. */
 export const paths = {
+  home: "/",
   signIn: "/sign-in",
   forgot: "/forgot",
   invitation: (token: string) => `/invitation/${token}`,

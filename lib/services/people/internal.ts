@@ -40,6 +40,15 @@ export async function memberToChange(tx: Tx, memberId: string) {
   return member;
 }
 
+type Membership = { companyId: string; companyName: string; role: Role };
+
+export async function membershipsOf(tx: Tx, userId: string): Promise<Membership[]> {
+  const rows = await tx.execute<{ company_id: string; company_name: string; role: Role }>(
+    sql`select * from app.memberships_of(${userId}::uuid)`,
+  );
+  return rows.map((row) => ({ companyId: row.company_id, companyName: row.company_name, role: row.role }));
+}
+
 /** A company without an owner could never be managed again. */
 export async function mustKeepAnOwner(tx: Tx): Promise<void> {
   const [row] = await tx
