@@ -29,12 +29,8 @@ export const SAMPLES: Record<string, Sample> = {
   "account.end-session": async (w, caller) => ({ sessionId: await secondSession(caller ?? w.owner.actor) }),
   "account.enter-company": (w) => ({ companyId: w.company.companyId }),
   "account.get": () => ({}),
-  "account.send-password-reset": (w) => ({ memberId: w.technician.memberId, email: w.technician.email }),
-  "account.send-sign-in-link": (w) => ({
-    memberId: w.technician.memberId,
-    email: w.technician.email,
-    url: "http://localhost/sign-in",
-  }),
+  "account.send-password-reset": (w) => ({ requestId: uuidv7(), memberId: w.technician.memberId }),
+  "account.send-sign-in-link": (w) => ({ requestId: uuidv7(), memberId: w.technician.memberId }),
   "account.sign-out-everywhere": () => ({}),
   "audit.list": () => ({}),
   "company.found": () => ({
