@@ -1,6 +1,6 @@
 import { sql } from "drizzle-orm";
 import { check, date, doublePrecision, foreignKey, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
-import { HOLDER_CAPACITIES, SITE_KINDS } from "@/lib/domain/sites/words";
+import { DOCUMENT_KINDS, HOLDER_CAPACITIES, KEY_KINDS, SECRET_KINDS, SITE_KINDS } from "@/lib/domain/sites/words";
 import {
   companyId,
   createdAt,
@@ -34,12 +34,18 @@ export const sites = pgTable(
     latitude: doublePrecision("latitude"),
     longitude: doublePrecision("longitude"),
     zone: text("zone").notNull(),
+    /** The company's own list calls the site by this, the same at every import. */
+    key: text("key"),
+    /** Who approves and inspects there. */
+    authorityName: text("authority_name"),
+    authorityPhone: text("authority_phone"),
     createdAt: createdAt(),
   },
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
+    unique("sites_key_unique").on(t.companyId, t.key),
     unique("sites_address_unique").on(t.companyId, t.street, t.city, t.state, t.name),
-    mayRead(either(OFFICE, MY_SITE("id"))),
+    mayRead(either(OFFICE, MY_SITE("id"), "id = (select app.link_site_id())")),
     mayAdd(OFFICE),
     mayChange(OFFICE),
   ],
@@ -99,5 +105,91 @@ export const contactSites = pgTable(
     mayAdd(OFFICE),
     mayRemove(OFFICE),
     gate(),
+  ],
+);
+
+const ofSite = () => ({ companyId: companyId(), id: id(), siteId: uuid("site_id").notNull() });
+const CREW_AND_OFFICE = either(OFFICE, TECHNICIAN_OF_SITE);
+
+/** The account at the supervising station. */
+export const stationAccounts = pgTable(
+  "station_accounts",
+  {
+    ...ofSite(),
+    station: text("station").notNull(),
+    phone: text("phone").notNull(),
+    accountNumber: text("account_number").notNull(),
+    note: text("note"),
+    createdAt: createdAt(),
+    endedAt: instant("ended_at"),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
+    mayRead(CREW_AND_OFFICE),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
+
+/** Keys, badges and fobs, and where they are. */
+export const siteKeys = pgTable(
+  "site_keys",
+  {
+    ...ofSite(),
+    kind: text("kind", { enum: KEY_KINDS }).notNull(),
+    label: text("label").notNull(),
+    /** Who has it now, or where it hangs. */
+    keptBy: text("kept_by").notNull(),
+    createdAt: createdAt(),
+    endedAt: instant("ended_at"),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
+    mayRead(CREW_AND_OFFICE),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
+
+/** Papers of the site and where they are kept. */
+export const siteDocuments = pgTable(
+  "site_documents",
+  {
+    ...ofSite(),
+    kind: text("kind", { enum: DOCUMENT_KINDS }).notNull(),
+    title: text("title").notNull(),
+    dated: date("dated", { mode: "string" }),
+    keptWhere: text("kept_where").notNull(),
+    createdAt: createdAt(),
+    endedAt: instant("ended_at"),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
+    mayRead(either(OFFICE, MY_SITE())),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
+
+/** Codes, encrypted by the application: the office and that day's crew may look, and each look is in the audit trail. */
+export const siteSecrets = pgTable(
+  "site_secrets",
+  {
+    ...ofSite(),
+    kind: text("kind", { enum: SECRET_KINDS }).notNull(),
+    label: text("label").notNull(),
+    sealed: text("sealed").notNull(),
+    createdAt: createdAt(),
+    endedAt: instant("ended_at"),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
+    mayRead(either("(select app.role()) in ('owner', 'dispatcher')", "site_id in (select app.my_site_ids_today())")),
+    mayAdd("(select app.role()) in ('owner', 'dispatcher')"),
+    mayChange("(select app.role()) in ('owner', 'dispatcher')"),
   ],
 );

@@ -7,3 +7,9 @@ export const JOB_KIND_WORDS: Record<JobKind, string> = {
   service_call: "Service call",
   acceptance: "Acceptance",
 };
+
+/** What a job may wait for. */
+export const WAITS_FOR = ["parts", "access", "approval"] as const;
+export type WaitsFor = (typeof WAITS_FOR)[number];
+
+export const WAITS_FOR_WORDS: Record<WaitsFor, string> = { parts: "parts", access: "access", approval: "approval" };

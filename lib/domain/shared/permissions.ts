@@ -3,6 +3,8 @@ import type { Role } from "./roles";
 /** Everything that anybody may be allowed to do. A verb or read names exactly one. */
 export const PERMISSIONS = [
   "account:own",
+  "agreement:read",
+  "agreement:write",
   "audit:read",
   "company:found",
   "company:read",
@@ -11,6 +13,7 @@ export const PERMISSIONS = [
   "customer:write",
   "delivery:read",
   "delivery:retry",
+  "due:sweep",
   "field:read",
   "find:read",
   "invitation:accept",
@@ -21,8 +24,14 @@ export const PERMISSIONS = [
   "person:read",
   "person:write",
   "portal:read",
+  "secret:look",
+  "secret:write",
   "site:read",
   "site:write",
+  "system:read",
+  "system:write",
+  "visit:answer",
+  "visit:override",
   "visit:read",
   "visit:write",
 ] as const;
@@ -30,12 +39,14 @@ export type Permission = (typeof PERMISSIONS)[number];
 
 const OFFICE = [
   "account:own",
+  "agreement:read",
   "company:read",
   "customer:read",
   "find:read",
   "job:read",
   "person:read",
   "site:read",
+  "system:read",
   "visit:read",
 ] as const satisfies readonly Permission[];
 
@@ -43,6 +54,7 @@ const OFFICE = [
 export const ROLE_GRANTS: Record<Role, readonly Permission[]> = {
   owner: [
     ...OFFICE,
+    "agreement:write",
     "audit:read",
     "company:write",
     "customer:write",
@@ -50,18 +62,33 @@ export const ROLE_GRANTS: Record<Role, readonly Permission[]> = {
     "delivery:retry",
     "job:write",
     "person:write",
+    "secret:look",
+    "secret:write",
     "site:write",
+    "system:write",
+    "visit:override",
     "visit:write",
   ],
-  dispatcher: [...OFFICE, "customer:write", "job:write", "site:write", "visit:write"],
-  bookkeeper: [...OFFICE, "customer:write"],
-  technician: ["account:own", "field:read", "find:read"],
+  dispatcher: [
+    ...OFFICE,
+    "agreement:write",
+    "customer:write",
+    "job:write",
+    "secret:look",
+    "secret:write",
+    "site:write",
+    "system:write",
+    "visit:override",
+    "visit:write",
+  ],
+  bookkeeper: [...OFFICE, "agreement:write", "customer:write"],
+  technician: ["account:own", "field:read", "find:read", "secret:look", "system:read"],
   customer: ["account:own", "find:read", "portal:read"],
 };
 
 /** What a signed link may carry. */
-export const LINK_GRANTS = ["invitation:accept", "password:reset"] as const satisfies readonly Permission[];
+export const LINK_GRANTS = ["invitation:accept", "password:reset", "visit:answer"] as const satisfies readonly Permission[];
 export type LinkGrant = (typeof LINK_GRANTS)[number];
 
-export const WORKER_GRANTS: readonly Permission[] = ["mail:send"];
+export const WORKER_GRANTS: readonly Permission[] = ["due:sweep", "mail:send"];
 export const OPERATOR_GRANTS: readonly Permission[] = ["company:found"];

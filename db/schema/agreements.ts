@@ -1,0 +1,71 @@
+import { sql } from "drizzle-orm";
+import { check, date, foreignKey, index, integer, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
+import { ANCHORS, FREQUENCIES, TEST_KINDS } from "@/lib/domain/agreements/words";
+import { FUNCTIONS } from "@/lib/domain/systems/words";
+import { companyId, createdAt, id, instant, mayAdd, mayChange, mayRead, OFFICE } from "./columns";
+import { customers } from "./customers";
+import { sites } from "./sites";
+import { systems } from "./systems";
+
+/** The contract to do kinds of test at sites at frequencies for a price. */
+export const agreements = pgTable(
+  "agreements",
+  {
+    companyId: companyId(),
+    id: id(),
+    number: integer("number").notNull(),
+    customerId: uuid("customer_id").notNull(),
+    name: text("name").notNull(),
+    startsOn: date("starts_on", { mode: "string" }).notNull(),
+    endsOn: date("ends_on", { mode: "string" }),
+    createdAt: createdAt(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    unique("agreements_number_unique").on(t.companyId, t.number),
+    foreignKey({ columns: [t.companyId, t.customerId], foreignColumns: [customers.companyId, customers.id] }),
+    check("agreements_dates", sql`${t.endsOn} >= ${t.startsOn}`),
+    mayRead(OFFICE),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
+
+/** One kind of test at one site, how often, and for how much. */
+export const agreementItems = pgTable(
+  "agreement_items",
+  {
+    companyId: companyId(),
+    id: id(),
+    agreementId: uuid("agreement_id").notNull(),
+    siteId: uuid("site_id").notNull(),
+    systemId: uuid("system_id"),
+    testKind: text("test_kind", { enum: TEST_KINDS }).notNull(),
+    functions: text("functions", { enum: FUNCTIONS }).array().notNull(),
+    frequency: text("frequency", { enum: FREQUENCIES }).notNull(),
+    /** Which reading of the frequency: a key of the interval rules. */
+    rule: text("rule").notNull(),
+    anchor: text("anchor", { enum: ANCHORS }).notNull(),
+    /** The first target date, from which a fixed anchor counts. */
+    anchorOn: date("anchor_on", { mode: "string" }).notNull(),
+    visitMinutes: integer("visit_minutes").notNull(),
+    crewSize: integer("crew_size").notNull(),
+    priceCents: integer("price_cents").notNull(),
+    createdAt: createdAt(),
+    endedAt: instant("ended_at"),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    foreignKey({ columns: [t.companyId, t.agreementId], foreignColumns: [agreements.companyId, agreements.id] }),
+    foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
+    foreignKey({ columns: [t.companyId, t.systemId], foreignColumns: [systems.companyId, systems.id] }),
+    check(
+      "agreement_items_figures",
+      sql`${t.visitMinutes} > 0 and ${t.crewSize} between 1 and 20 and ${t.priceCents} >= 0`,
+    ),
+    index("agreement_items_site").on(t.companyId, t.siteId),
+    mayRead(OFFICE),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
