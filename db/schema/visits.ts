@@ -49,14 +49,17 @@ export const visits = pgTable(
     createdAt: createdAt(),
     canceledAt: instant("canceled_at"),
     canceledBy: uuid("canceled_by"),
+    cancelReason: text("cancel_reason"),
   },
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
     foreignKey({ columns: [t.companyId, t.jobId], foreignColumns: [jobs.companyId, jobs.id] }),
     foreignKey({ columns: [t.companyId, t.siteId], foreignColumns: [sites.companyId, sites.id] }),
     check("visits_ends_after_start", sql`${t.endsAt} > ${t.startsAt}`),
+    index("visits_job").on(t.companyId, t.jobId),
     index("visits_starts_at").on(t.companyId, t.startsAt),
     index("visits_site").on(t.companyId, t.siteId, t.startsAt),
+    index("visits_job").on(t.companyId, t.jobId),
     mayRead(either(OFFICE, "id in (select app.my_visit_ids())")),
     mayAdd(OFFICE),
     mayChange(OFFICE),
@@ -93,6 +96,7 @@ export const visitCrew = pgTable(
 );
 
 const OF_MY_VISITS = either(OFFICE, "visit_id in (select app.my_visit_ids())");
+const CREW_AND_OFFICE = either(OFFICE, "(select app.is_technician()) and visit_id in (select app.my_visit_ids())");
 
 /** The part of a visit in which functions really operate. */
 export const liveBlocks = pgTable(
@@ -140,12 +144,16 @@ export const visitOverrides = pgTable(
     primaryKey({ columns: [t.companyId, t.id] }),
     foreignKey({ columns: [t.companyId, t.visitId], foreignColumns: [visits.companyId, visits.id] }),
     foreignKey({ columns: [t.companyId, t.createdBy], foreignColumns: [members.companyId, members.id] }),
-    mayRead(OF_MY_VISITS),
+    mayRead(CREW_AND_OFFICE),
     mayAdd(OFFICE),
   ],
 );
 
-const ASKED = "id = (select app.link_subject()) and (select app.is_link())";
+/** Whoever was asked sees and answers that one ask, by the link or signed in; not what others were asked. */
+const ASKED = either(
+  "id = (select app.link_subject()) and (select app.is_link())",
+  "contact_id = (select app.contact_id())",
+);
 
 /** Whom the company asked to agree to a visit as it stood at a sequence, and what was answered, when and how. */
 export const visitAsks = pgTable(
@@ -176,7 +184,7 @@ export const visitAsks = pgTable(
     foreignKey({ columns: [t.companyId, t.recordedBy], foreignColumns: [members.companyId, members.id] }),
     check("visit_asks_answer", sql`num_nonnulls(${t.answer}, ${t.answeredAt}, ${t.channel}) in (0, 3)`),
     index("visit_asks_visit").on(t.companyId, t.visitId),
-    mayRead(either(OFFICE, "visit_id in (select app.my_visit_ids())", ASKED)),
+    mayRead(either(CREW_AND_OFFICE, ASKED)),
     mayAdd(OFFICE),
     mayChange(either(OFFICE, ASKED)),
     gate(),
