@@ -1,8 +1,21 @@
 import { sql } from "drizzle-orm";
-import { check, date, foreignKey, index, integer, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
+import {
+  boolean,
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { ANCHORS, FREQUENCIES, TEST_KINDS } from "@/lib/domain/agreements/words";
 import { FUNCTIONS } from "@/lib/domain/systems/words";
-import { companyId, createdAt, id, instant, mayAdd, mayChange, mayRead, OFFICE } from "./columns";
+import { companyId, createdAt, gate, id, instant, mayAdd, mayChange, mayRead, OFFICE, WORKER } from "./columns";
+import { companies } from "./company";
 import { customers } from "./customers";
 import { sites } from "./sites";
 import { systems } from "./systems";
@@ -18,6 +31,9 @@ export const agreements = pgTable(
     name: text("name").notNull(),
     startsOn: date("starts_on", { mode: "string" }).notNull(),
     endsOn: date("ends_on", { mode: "string" }),
+    /** No work without a purchase order; one may stand for the whole agreement. */
+    purchaseOrderNeeded: boolean("purchase_order_needed").notNull().default(false),
+    purchaseOrder: text("purchase_order"),
     createdAt: createdAt(),
   },
   (t) => [
@@ -45,6 +61,8 @@ export const agreementItems = pgTable(
     frequency: text("frequency", { enum: FREQUENCIES }).notNull(),
     /** Which reading of the frequency: a key of the interval rules. */
     rule: text("rule").notNull(),
+    /** Days either way, for the agreement's own rule alone. */
+    toleranceDays: integer("tolerance_days"),
     anchor: text("anchor", { enum: ANCHORS }).notNull(),
     /** The first target date, from which a fixed anchor counts. */
     anchorOn: date("anchor_on", { mode: "string" }).notNull(),
@@ -63,9 +81,46 @@ export const agreementItems = pgTable(
       "agreement_items_figures",
       sql`${t.visitMinutes} > 0 and ${t.crewSize} between 1 and 20 and ${t.priceCents} >= 0`,
     ),
+    check("agreement_items_tolerance", sql`(${t.rule} = 'by_agreement') = (${t.toleranceDays} is not null)`),
+    check("agreement_items_tolerance_days", sql`${t.toleranceDays} between 0 and 366`),
     index("agreement_items_site").on(t.companyId, t.siteId),
     mayRead(OFFICE),
     mayAdd(OFFICE),
     mayChange(OFFICE),
   ],
+);
+
+/** When an occurrence was done: by a job of ours, or before we came. The next window counts from the newest. */
+export const completions = pgTable(
+  "completions",
+  {
+    companyId: companyId(),
+    id: id(),
+    itemId: uuid("item_id").notNull(),
+    /** Tells occurrences apart. */
+    targetOn: date("target_on", { mode: "string" }).notNull(),
+    doneOn: date("done_on", { mode: "string" }).notNull(),
+    createdAt: createdAt(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.companyId, t.id] }),
+    unique("completions_once").on(t.companyId, t.itemId, t.targetOn),
+    foreignKey({ columns: [t.companyId, t.itemId], foreignColumns: [agreementItems.companyId, agreementItems.id] }),
+    mayRead(OFFICE),
+    mayAdd(OFFICE),
+    mayChange(OFFICE),
+  ],
+);
+
+/** When the worker last looked through a company's agreements for jobs to make, and when it will again. */
+export const dueSweeps = pgTable(
+  "due_sweeps",
+  {
+    companyId: uuid("company_id")
+      .primaryKey()
+      .references(() => companies.companyId),
+    lastAt: instant("last_at").notNull(),
+    nextAt: instant("next_at").notNull(),
+  },
+  () => [mayRead(WORKER), mayAdd(WORKER), mayChange(WORKER), gate()],
 );

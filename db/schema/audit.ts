@@ -1,8 +1,11 @@
 import { index, jsonb, pgTable, primaryKey, text, uuid } from "drizzle-orm/pg-core";
-import { ANYONE, companyId, id, instant, mayAdd, mayRead, OWNER } from "./columns";
+import { ANYONE, companyId, either, id, instant, mayAdd, mayRead, OFFICE, OWNER } from "./columns";
 import { companies } from "./company";
 
-/** Who did what, when: written by `command` in the same transaction, never changed (there is no such policy). */
+/**
+ * Who did what, when: written by `command` in the same transaction, never changed (there is no such policy). The owner
+ * reads all of it, the office the history of its work.
+ */
 export const auditEntries = pgTable(
   "audit_entries",
   {
@@ -23,7 +26,7 @@ export const auditEntries = pgTable(
     primaryKey({ columns: [t.companyId, t.id] }),
     index("audit_entries_entity").on(t.companyId, t.entityId),
     index("audit_entries_at").on(t.companyId, t.at),
-    mayRead(OWNER),
+    mayRead(either(OWNER, `${OFFICE} and entity in ('agreement', 'job', 'visit')`)),
     mayAdd(ANYONE),
   ],
 );

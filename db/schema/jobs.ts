@@ -53,6 +53,7 @@ export const jobs = pgTable(
     createdBy: uuid("created_by"),
     canceledAt: instant("canceled_at"),
     canceledBy: uuid("canceled_by"),
+    cancelReason: text("cancel_reason"),
   },
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
@@ -70,6 +71,7 @@ export const jobs = pgTable(
       .on(t.companyId, t.agreementItemId, t.targetOn)
       .where(sql`agreement_item_id is not null and canceled_at is null`),
     index("jobs_site").on(t.companyId, t.siteId),
+    index("jobs_open").on(t.companyId, t.number).where(sql`canceled_at is null and done_on is null`),
     foreignKey({ columns: [t.companyId, t.createdBy], foreignColumns: [members.companyId, members.id] }),
     mayRead(either(OFFICE, "id in (select app.my_job_ids())")),
     mayAdd(OFFICE),

@@ -32,12 +32,23 @@ export const calendarDate = (instant: Date, zone: Zone): CalendarDate => toLocal
 
 export const startOfDate = (date: CalendarDate, zone: Zone): Date => toInstant(`${date}T00:00`, zone);
 
+const DAY_MS = 86_400_000;
+const midnightUtc = (date: CalendarDate): number => Date.parse(`${date}T00:00:00Z`);
+const dateOf = (ms: number): CalendarDate => new Date(ms).toISOString().slice(0, 10);
+
 /** Calendar dates count in days, whatever the clocks do. */
-export const addDays = (date: CalendarDate, days: number): CalendarDate =>
-  moment.utc(date, "YYYY-MM-DD", true).add(days, "days").format("YYYY-MM-DD");
+export const addDays = (date: CalendarDate, days: number): CalendarDate => dateOf(midnightUtc(date) + days * DAY_MS);
 
 export const daysBetween = (from: CalendarDate, to: CalendarDate): number =>
-  moment.utc(to, "YYYY-MM-DD", true).diff(moment.utc(from, "YYYY-MM-DD", true), "days");
+  (midnightUtc(to) - midnightUtc(from)) / DAY_MS;
+
+/** The same day of the month so many months on (or back); where that month is too short, its last day. */
+export function addMonths(date: CalendarDate, months: number): CalendarDate {
+  const at = new Date(midnightUtc(date));
+  const [year, month] = [at.getUTCFullYear(), at.getUTCMonth() + months];
+  const lastDay = new Date(Date.UTC(year, month + 1, 0)).getUTCDate();
+  return dateOf(Date.UTC(year, month, Math.min(at.getUTCDate(), lastDay)));
+}
 
 /** For people: `Tue, Dec 1, 2026`. */
 export const dateWords = (date: CalendarDate): string =>
