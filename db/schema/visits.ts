@@ -59,7 +59,6 @@ export const visits = pgTable(
     index("visits_job").on(t.companyId, t.jobId),
     index("visits_starts_at").on(t.companyId, t.startsAt),
     index("visits_site").on(t.companyId, t.siteId, t.startsAt),
-    index("visits_job").on(t.companyId, t.jobId),
     mayRead(either(OFFICE, "id in (select app.my_visit_ids())")),
     mayAdd(OFFICE),
     mayChange(OFFICE),
