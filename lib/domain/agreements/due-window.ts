@@ -60,10 +60,9 @@ export function stepsFrom(date: CalendarDate, frequency: Frequency, count: numbe
 function nextTarget({ frequency, anchor, anchorOn }: DueSchedule, last: Completion | null): CalendarDate {
   if (!last) return anchorOn;
   if (anchor === "last_done") return stepsFrom(last.doneOn, frequency, 1);
-  let n = nearestStep(anchorOn, frequency, last.targetOn) + 1;
-  const late = stepBefore(anchorOn, frequency, last.doneOn) + 1;
-  n = Math.max(n, late);
-  return stepsFrom(anchorOn, frequency, n);
+  const its = nearestStep(anchorOn, frequency, last.targetOn);
+  const come = stepBefore(anchorOn, frequency, last.doneOn);
+  return stepsFrom(anchorOn, frequency, Math.max(its, come) + 1);
 }
 
 /** The last step on or before a date. */

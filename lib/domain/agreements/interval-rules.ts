@@ -106,13 +106,7 @@ const HOSPITAL_BY_MONTH: IntervalRule = {
 };
 
 export const BY_AGREEMENT = "by_agreement";
-export const RULE_KEYS = [
-  NFPA_72.key,
-  NFPA_25.key,
-  HOSPITAL_BY_DAY.key,
-  HOSPITAL_BY_MONTH.key,
-  BY_AGREEMENT,
-] as const;
+export const RULE_KEYS = [NFPA_72.key, NFPA_25.key, HOSPITAL_BY_DAY.key, HOSPITAL_BY_MONTH.key, BY_AGREEMENT] as const;
 
 const PUBLISHED = [NFPA_72, NFPA_25, HOSPITAL_BY_DAY, HOSPITAL_BY_MONTH];
 
