@@ -5,6 +5,9 @@ import * as invitation from "./invitation";
 import * as passwordChanged from "./password-changed";
 import * as passwordReset from "./password-reset";
 import * as signInLink from "./sign-in-link";
+import * as visitAsked from "./visit-asked";
+import * as visitCanceled from "./visit-canceled";
+import * as visitMoved from "./visit-moved";
 
 export type RenderedMail = { subject: string; html: string; text: string };
 
@@ -19,6 +22,12 @@ export function renderMail(mail: MailTemplate, url: string): Promise<RenderedMai
       return both(passwordReset.subject, passwordReset.PasswordReset, { ...mail, url });
     case "password-changed":
       return both(passwordChanged.subject, passwordChanged.PasswordChanged, { ...mail, url });
+    case "visit-asked":
+      return both(visitAsked.subject, visitAsked.VisitAsked, { ...mail, url });
+    case "visit-moved":
+      return both(visitMoved.subject, visitMoved.VisitMoved, { ...mail, url });
+    case "visit-canceled":
+      return both(visitCanceled.subject, visitCanceled.VisitCanceled, { ...mail, url });
   }
 }
 

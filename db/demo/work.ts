@@ -9,9 +9,12 @@ const FROM_DAY = -7;
 const TO_DAY = 10;
 
 const SLOTS = [
-  ["07:00", "11:00"],
-  ["12:30", "15:30"],
+  { starts: "07:00", minutes: 240 },
+  { starts: "12:30", minutes: 180 },
 ] as const;
+
+/** One technician's license has just ended. */
+const RENEWAL = [{ code: "license_expired", note: "Renewal is filed, the state’s receipt is in the office" }];
 
 const WORK: readonly { kind: JobKind; title: string }[] = [
   { kind: "test", title: "Yearly fan shutdown test" },
@@ -32,7 +35,7 @@ export async function planWork(dispatcher: Context, technicians: string[], siteI
   for (let day = FROM_DAY; day <= TO_DAY; day++) {
     const date = addDays(today, day);
     if (!isWeekday(date)) continue;
-    for (const [slot, [starts, ends]] of SLOTS.entries()) {
+    for (const [slot, { starts, minutes }] of SLOTS.entries()) {
       for (let i = 0; i < technicians.length; i++) {
         const paired = (i + day + slot + 70) % 6 === 0 && i + 1 < technicians.length;
         const work = WORK[(count * 3 + i) % WORK.length];
@@ -42,8 +45,9 @@ export async function planWork(dispatcher: Context, technicians: string[], siteI
         await planVisit(dispatcher, {
           jobId: job.jobId,
           startsLocal: `${date}T${starts}`,
-          endsLocal: `${date}T${ends}`,
+          minutes,
           crew,
+          overrides: RENEWAL,
         });
         if (paired) i++;
         count++;

@@ -1,5 +1,5 @@
 import { randomBytes } from "node:crypto";
-import { and, eq, isNull } from "drizzle-orm";
+import { and, eq, inArray, isNull } from "drizzle-orm";
 import type { Tx } from "@/db/client";
 import { hashToken } from "@/db/door";
 import { links } from "@/db/schema/messages";
@@ -28,11 +28,16 @@ export async function spendLink(tx: Tx, who: Entered, now: Date): Promise<string
   return used[0].subjectId;
 }
 
-export async function withdrawLinks(tx: Tx, subjectId: string, grant: LinkGrant, now: Date): Promise<void> {
+export async function withdrawLinks(tx: Tx, subjectIds: string[], grant: LinkGrant, now: Date): Promise<void> {
   await tx
     .update(links)
     .set({ withdrawnAt: now })
     .where(
-      and(eq(links.subjectId, subjectId), eq(links.grant, grant), isNull(links.usedAt), isNull(links.withdrawnAt)),
+      and(
+        inArray(links.subjectId, subjectIds),
+        eq(links.grant, grant),
+        isNull(links.usedAt),
+        isNull(links.withdrawnAt),
+      ),
     );
 }

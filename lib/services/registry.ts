@@ -34,18 +34,27 @@ import { resetPassword } from "./people/reset-password";
 import { restoreMembership } from "./people/restore-membership";
 import { setHome } from "./people/set-home";
 import { signOutEverywhere } from "./people/sign-out-everywhere";
+import { getPlaces } from "./planning/get-places";
 import { addHolder } from "./sites/add-holder";
 import { createSite } from "./sites/create-site";
 import { endHolder } from "./sites/end-holder";
 import { getSite } from "./sites/get-site";
 import { listSites } from "./sites/list-sites";
 import { updateSite } from "./sites/update-site";
+import { answerVisit } from "./visits/answer";
+import { askForVisit } from "./visits/ask";
 import { cancelVisit } from "./visits/cancel-visit";
+import { getAsked } from "./visits/get-asked";
 import { getFieldDay } from "./visits/get-field-day";
 import { getOverview } from "./visits/get-overview";
 import { getPortal } from "./visits/get-portal";
+import { getReasons } from "./visits/get-reasons";
 import { getRunSheet } from "./visits/get-run-sheet";
+import { getVisit } from "./visits/get-visit";
+import { moveVisit } from "./visits/move-visit";
 import { planVisit } from "./visits/plan-visit";
+import { recordAnswer } from "./visits/record-answer";
+import { swapVisits } from "./visits/swap-visits";
 
 /** Everything that can be done or read. Doors (actions, routes, worker, sync) take verbs from nowhere else. */
 export const COMMANDS: readonly Verb[] = [
@@ -77,8 +86,13 @@ export const COMMANDS: readonly Verb[] = [
   createSite,
   endHolder,
   updateSite,
+  answerVisit,
+  askForVisit,
   cancelVisit,
+  moveVisit,
   planVisit,
+  recordAnswer,
+  swapVisits,
 ];
 
 export const QUERIES: readonly Verb[] = [
@@ -99,4 +113,8 @@ export const QUERIES: readonly Verb[] = [
   getPortal,
   getOverview,
   getRunSheet,
+  getAsked,
+  getPlaces,
+  getReasons,
+  getVisit,
 ];

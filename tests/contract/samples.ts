@@ -3,9 +3,10 @@ import type { Actor } from "@/lib/auth/actor";
 import { addContact } from "@/lib/services/customers/add-contact";
 import { endMembership } from "@/lib/services/people/end-membership";
 import { inviteStaff } from "@/lib/services/people/invite-staff";
+import { askForVisit } from "@/lib/services/visits/ask";
 import { givePassword, secondSession, unique, uniqueAddress } from "../factories/company";
 import { deadLetter } from "../factories/messages";
-import { newCustomer, newSite, newVisit, type World } from "../factories/world";
+import { newCustomer, newSite, newVisit, UNLICENSED, type World } from "../factories/world";
 
 const address = { street: "2 Test Street", city: "Chicago", state: "IL", postalCode: "60601" };
 
@@ -106,18 +107,47 @@ export const SAMPLES: Record<string, Sample> = {
   "visit.cancel": async (w) => {
     const date = nextDay();
     const { visitId } = await newVisit(w.company, w.site.siteId, [w.technician], `${date}T08:00`, `${date}T09:00`);
-    return { visitId };
+    return { visitId, reason: "The building is closed" };
   },
-  "visit.plan": async (w) => {
-    const date = nextDay();
-    return {
-      jobId: w.visit.jobId,
-      startsLocal: `${date}T08:00`,
-      endsLocal: `${date}T12:00`,
-      crew: [w.technician.memberId],
-    };
-  },
+  "visit.answer": async (w) => ({ askId: await freshAsk(w), answer: "acknowledged", permitNumber: "HW-7" }),
+  "visit.ask": async (w) => ({ visitId: await freshVisit(w), contactIds: [w.contact.contactId] }),
+  "visit.asked": async (w) => ({ askId: await freshAsk(w) }),
+  "visit.get": (w) => ({ visitId: w.visit.visitId }),
+  "visit.move": async (w) => ({
+    visitId: await freshVisit(w),
+    sequence: 0,
+    startsLocal: `${nextDay()}T10:00`,
+    overrides: UNLICENSED,
+  }),
+  "visit.places": (w) => ({ jobId: w.visit.jobId, date: "2026-12-02" }),
+  "visit.plan": (w) => ({
+    jobId: w.visit.jobId,
+    startsLocal: `${nextDay()}T08:00`,
+    minutes: 240,
+    crew: [w.technician.memberId],
+    overrides: UNLICENSED,
+  }),
+  "visit.reasons": (w) => ({
+    jobId: w.visit.jobId,
+    startsLocal: "2026-12-02T08:00",
+    minutes: 60,
+    crew: w.technician.memberId,
+  }),
+  "visit.record-answer": async (w) => ({
+    visitId: await freshVisit(w),
+    name: unique("Engineer"),
+    answeredLocal: "2026-12-01T09:00",
+    channel: "telephone",
+    answer: "declined",
+    note: "Exams that week",
+  }),
   "visit.run-sheet": () => ({ date: "2026-12-02" }),
+  "visit.swap": async (w) => ({
+    first: { visitId: await freshVisit(w), sequence: 0 },
+    second: { visitId: await freshVisit(w), sequence: 0 },
+    exchange: "times",
+    overrides: UNLICENSED,
+  }),
 };
 
 const freshMember = async (w: World) =>
@@ -131,3 +161,14 @@ const freshContact = async (w: World) =>
       email: uniqueAddress(),
     })
   ).contactId;
+
+async function freshVisit(w: World): Promise<string> {
+  const date = nextDay();
+  return (await newVisit(w.company, w.site.siteId, [w.technician], `${date}T08:00`, `${date}T09:00`)).visitId;
+}
+
+async function freshAsk(w: World): Promise<string> {
+  const visitId = await freshVisit(w);
+  const { asked } = await askForVisit(w.owner.context, { visitId, contactIds: [w.contact.contactId] });
+  return asked[0]?.askId ?? "";
+}

@@ -97,7 +97,7 @@ describe("a technician", () => {
       "2026-12-04T08:00",
       "2026-12-04T10:00",
     );
-    await cancelVisit(w.owner.context, { visitId });
+    await cancelVisit(w.owner.context, { visitId, reason: "The building is closed" });
     expect(await seen(technician.actor, "visits")).toEqual([visitId]);
   });
 

@@ -36,7 +36,9 @@ describe("travel", () => {
 
   test("never grows shorter as the way grows longer", () => {
     const from = { latitude: 40, longitude: -90 };
-    const minutes = Array.from({ length: 400 }, (_, i) => travelMinutes(from, { latitude: 40 + i / 250, longitude: -90 }));
+    const minutes = Array.from({ length: 400 }, (_, i) =>
+      travelMinutes(from, { latitude: 40 + i / 250, longitude: -90 }),
+    );
     expect(minutes).toEqual([...minutes].sort((a, b) => a - b));
     expect(new Set(minutes).size).toBeGreaterThan(50);
   });

@@ -9,8 +9,7 @@ const radians = (degrees: number) => (degrees * Math.PI) / 180;
 export function greatCircleKm(a: Coordinates, b: Coordinates): number {
   const sinLatitude = Math.sin(radians(b.latitude - a.latitude) / 2);
   const sinLongitude = Math.sin(radians(b.longitude - a.longitude) / 2);
-  const h =
-    sinLatitude ** 2 + Math.cos(radians(a.latitude)) * Math.cos(radians(b.latitude)) * sinLongitude ** 2;
+  const h = sinLatitude ** 2 + Math.cos(radians(a.latitude)) * Math.cos(radians(b.latitude)) * sinLongitude ** 2;
   return 2 * EARTH_RADIUS_KM * Math.asin(Math.min(1, Math.sqrt(h)));
 }
 

@@ -83,11 +83,15 @@ export const ROLE_GRANTS: Record<Role, readonly Permission[]> = {
   ],
   bookkeeper: [...OFFICE, "agreement:write", "customer:write"],
   technician: ["account:own", "field:read", "find:read", "secret:look", "system:read"],
-  customer: ["account:own", "find:read", "portal:read"],
+  customer: ["account:own", "find:read", "portal:read", "visit:answer"],
 };
 
 /** What a signed link may carry. */
-export const LINK_GRANTS = ["invitation:accept", "password:reset", "visit:answer"] as const satisfies readonly Permission[];
+export const LINK_GRANTS = [
+  "invitation:accept",
+  "password:reset",
+  "visit:answer",
+] as const satisfies readonly Permission[];
 export type LinkGrant = (typeof LINK_GRANTS)[number];
 
 export const WORKER_GRANTS: readonly Permission[] = ["due:sweep", "mail:send"];

@@ -14,7 +14,7 @@ export const sendPasswordReset = command({
   async run({ tx, who, now }, { requestId, memberId }) {
     const taken = await takeRequest(tx, requestId, "password_reset", memberId);
     if (!taken) return { result: null, audit: [] };
-    await withdrawLinks(tx, memberId, "password:reset", now);
+    await withdrawLinks(tx, [memberId], "password:reset", now);
     const expiresAt = new Date(now.getTime() + PASSWORD_RESET_HOURS * 3_600_000);
     const token = await makeLink(tx, who, { grant: "password:reset", subjectId: memberId, expiresAt });
     const letter = { template: "password-reset", companyName: taken.companyName } as const;

@@ -18,7 +18,7 @@ export const endMembership = command({
     const endedBy = who.kind === "person" ? who.memberId : null;
     await tx.update(members).set({ endedAt: now, endedBy }).where(eq(members.id, memberId));
     await mustKeepAnOwner(tx);
-    await withdrawLinks(tx, memberId, "invitation:accept", now);
+    await withdrawLinks(tx, [memberId], "invitation:accept", now);
     if (before.userId) {
       await tx
         .update(sessions)

@@ -18,7 +18,7 @@ export async function sendInvitation(tx: Tx, who: Entered, invited: Invited, now
   const [company] = await tx.select({ name: companies.name }).from(companies);
   const inviter =
     who.kind === "person" ? (await tx.select().from(members).where(eq(members.id, who.memberId)))[0]?.name : undefined;
-  await withdrawLinks(tx, invited.memberId, "invitation:accept", now);
+  await withdrawLinks(tx, [invited.memberId], "invitation:accept", now);
   const token = await makeLink(tx, who, {
     grant: "invitation:accept",
     subjectId: invited.memberId,

@@ -1,23 +1,27 @@
-import { and, eq, isNull } from "drizzle-orm";
-import { visitCrew, visits } from "@/db/schema/visits";
+import { eq } from "drizzle-orm";
+import { visits } from "@/db/schema/visits";
 import { CancelVisitInput } from "@/lib/domain/visits/schemas";
-import { AppError, notFound } from "@/lib/errors";
 import { command } from "@/lib/services/command";
+import { tellCanceled } from "./asks";
+import { releaseCrew, visitsToChange } from "./placing";
 
+/** The answer says how the visit stood, so that it can be planned again. */
 export const cancelVisit = command({
   name: "visit.cancel",
   needs: "visit:write",
   input: CancelVisitInput,
-  async run({ tx, who, now }, { visitId }) {
-    const [before] = await tx.select().from(visits).where(eq(visits.id, visitId)).for("update");
-    if (!before) throw notFound("visit");
-    if (before.canceledAt) throw new AppError("conflict", "This visit is already canceled");
+  async run({ tx, who, now }, { visitId, reason }) {
+    const [standing] = await visitsToChange(tx, [{ visitId }]);
+    if (!standing) throw new Error("a visit was neither found nor refused");
+    const { visit, placing } = standing;
+    await tellCanceled(tx, who, visit, reason, now);
     const canceledBy = who.kind === "person" ? who.memberId : null;
-    await tx.update(visits).set({ canceledAt: now, canceledBy }).where(eq(visits.id, visitId));
-    await tx
-      .update(visitCrew)
-      .set({ releasedAt: now })
-      .where(and(eq(visitCrew.visitId, visitId), isNull(visitCrew.releasedAt)));
-    return { result: null, audit: { entity: "visit", entityId: visitId, before, after: { canceledAt: now } } };
+    const after = { canceledAt: now, canceledBy, cancelReason: reason, sequence: visit.sequence + 1 };
+    await tx.update(visits).set(after).where(eq(visits.id, visitId));
+    await releaseCrew(tx, [visitId], now);
+    return {
+      result: { jobId: visit.jobId, placing },
+      audit: { entity: "visit", entityId: visitId, before: visit, after },
+    };
   },
 });

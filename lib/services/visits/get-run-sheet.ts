@@ -1,14 +1,20 @@
-import { and, eq, isNull } from "drizzle-orm";
+import { and, asc, count, eq, isNull, notExists, sql } from "drizzle-orm";
 import { z } from "zod";
+import type { Tx } from "@/db/client";
 import { companies } from "@/db/schema/company";
+import { jobs, jobWaits } from "@/db/schema/jobs";
 import { members } from "@/db/schema/people";
+import { sites } from "@/db/schema/sites";
+import { visits } from "@/db/schema/visits";
 import { calendarDateText } from "@/lib/domain/shared/inputs";
-import { addDays, calendarDate, startOfDate } from "@/lib/domain/shared/zone";
+import { addDays, calendarDate, daysBetween, startOfDate } from "@/lib/domain/shared/zone";
 import { notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
-import { visitsBetween } from "./internal";
+import { asksOf, visitsBetween } from "./internal";
 
-/** One day of all crews, in the company's zone. */
+const MOST_IN_TRAY = 100;
+
+/** One day of all crews, in the company's zone, and what waits to be booked. */
 export const getRunSheet = query({
   name: "visit.run-sheet",
   needs: "visit:read",
@@ -16,15 +22,60 @@ export const getRunSheet = query({
   async run({ tx, now }, input) {
     const [company] = await tx.select({ zone: companies.zone }).from(companies);
     if (!company) throw notFound("company");
-    const today = calendarDate(now, company.zone);
+    const { zone } = company;
+    const today = calendarDate(now, zone);
     const date = input.date ?? today;
     const technicians = await tx
       .select({ id: members.id, name: members.name })
       .from(members)
       .where(and(eq(members.role, "technician"), isNull(members.endedAt)))
       .orderBy(members.name);
-    const from = startOfDate(date, company.zone);
-    const to = startOfDate(addDays(date, 1), company.zone);
-    return { date, today, zone: company.zone, technicians, visits: await visitsBetween(tx, from, to) };
+    const day = { startsAt: startOfDate(date, zone), endsAt: startOfDate(addDays(date, 1), zone) };
+    const all = await visitsBetween(tx, day.startsAt, day.endsAt);
+    const asks = await asksOf(
+      tx,
+      all.map((visit) => visit.id),
+    );
+    const onSheet = all.map((visit) => ({
+      ...visit,
+      asks: asks.filter((ask) => ask.visitId === visit.id).map(({ name, answer }) => ({ name, answer })),
+    }));
+    return { date, today, zone, day, technicians, visits: onSheet, tray: await toBook(tx, today) };
   },
 });
+
+/** Jobs that no visit stands for, the ones whose due window ends first on top. */
+async function toBook(tx: Tx, today: string) {
+  const standing = tx
+    .select({ one: sql`1` })
+    .from(visits)
+    .where(and(eq(visits.companyId, jobs.companyId), eq(visits.jobId, jobs.id), isNull(visits.canceledAt)));
+  const where = and(isNull(jobs.canceledAt), isNull(jobs.doneOn), notExists(standing));
+  const rows = await tx
+    .select({
+      id: jobs.id,
+      number: jobs.number,
+      kind: jobs.kind,
+      title: jobs.title,
+      urgent: jobs.urgent,
+      earliestOn: jobs.earliestOn,
+      latestOn: jobs.latestOn,
+      functions: jobs.functions,
+      visitMinutes: jobs.visitMinutes,
+      crewSize: jobs.crewSize,
+      site: { id: sites.id, name: sites.name, city: sites.city },
+      waitsFor: sql<
+        string[]
+      >`array(select ${jobWaits.waitsFor} from ${jobWaits} where ${jobWaits.companyId} = ${jobs.companyId} and ${jobWaits.jobId} = ${jobs.id} and ${jobWaits.endedAt} is null order by 1)`,
+    })
+    .from(jobs)
+    .innerJoin(sites, and(eq(sites.companyId, jobs.companyId), eq(sites.id, jobs.siteId)))
+    .where(where)
+    .orderBy(sql`${jobs.urgent} desc`, sql`${jobs.latestOn} asc nulls last`, asc(jobs.number))
+    .limit(MOST_IN_TRAY);
+  const [all] = await tx.select({ total: count() }).from(jobs).where(where);
+  return {
+    total: all?.total ?? 0,
+    jobs: rows.map((job) => ({ ...job, daysLeft: job.latestOn ? daysBetween(today, job.latestOn) : null })),
+  };
+}

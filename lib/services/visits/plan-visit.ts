@@ -1,45 +1,35 @@
-import { and, eq, inArray, isNull } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
-import type { Tx } from "@/db/client";
-import { jobs } from "@/db/schema/jobs";
-import { members } from "@/db/schema/people";
-import { visitCrew, visits } from "@/db/schema/visits";
-import { toInstant } from "@/lib/domain/shared/zone";
+import { visits } from "@/db/schema/visits";
 import { PlanVisitInput } from "@/lib/domain/visits/schemas";
-import { AppError, notFound } from "@/lib/errors";
+import { slotReasons } from "@/lib/domain/visits/slot-reasons";
 import { command } from "@/lib/services/command";
 import { siteById } from "@/lib/services/sites/internal";
+import { askContacts } from "./asks";
+import { keepOverrides, mustStand } from "./judge";
+import { jobToBook, lockCrew, placeOf, spanOf, timesOf, wantedOf, writePlacing } from "./placing";
+import { slotFacts } from "./slot-facts";
 
 export const planVisit = command({
   name: "visit.plan",
   needs: "visit:write",
   input: PlanVisitInput,
-  async run({ tx, who }, { jobId, startsLocal, endsLocal, crew }) {
-    const [job] = await tx.select().from(jobs).where(eq(jobs.id, jobId));
-    if (!job) throw notFound("job");
-    if (job.canceledAt) throw new AppError("blocked", "The job is canceled");
-    await mustBeTechnicians(tx, crew);
-    const { zone } = await siteById(tx, job.siteId);
-    const span = { startsAt: toInstant(startsLocal, zone), endsAt: toInstant(endsLocal, zone) };
-    const { companyId } = who;
+  async run({ tx, who, now }, { jobId, overrides, ask, ...placing }) {
+    const job = await jobToBook(tx, jobId);
+    const site = await siteById(tx, job.siteId);
+    const { zone } = site;
+    await lockCrew(tx, who, placing.crew);
+    const facts = await slotFacts(tx, { site, memberIds: placing.crew, span: spanOf(placing, zone), now });
     const visitId = uuidv7();
-    await tx
-      .insert(visits)
-      .values({ companyId, id: visitId, jobId, siteId: job.siteId, startsLocal, endsLocal, zone, ...span });
-    await tx
-      .insert(visitCrew)
-      .values(crew.map((memberId, i) => ({ companyId, visitId, memberId, lead: i === 0, ...span })));
+    const judged = { visitId, reasons: slotReasons(wantedOf(placing, job), placeOf(placing, zone), facts), overrides };
+    mustStand(who, [judged]);
+    const visit = { id: visitId, companyId: who.companyId, jobId, siteId: site.id, zone, ...timesOf(placing, zone) };
+    await tx.insert(visits).values(visit);
+    await writePlacing(tx, who, visit, placing);
+    await keepOverrides(tx, who, [judged]);
+    if (ask.length > 0) await askContacts(tx, who, visitId, ask, now);
     return {
       result: { visitId },
-      audit: { entity: "visit", entityId: visitId, after: { jobId, startsLocal, endsLocal, crew } },
+      audit: { entity: "visit", entityId: visitId, after: { jobId, ...placing, overrides, ask } },
     };
   },
 });
-
-async function mustBeTechnicians(tx: Tx, crew: string[]): Promise<void> {
-  const found = await tx
-    .select({ id: members.id })
-    .from(members)
-    .where(and(inArray(members.id, crew), eq(members.role, "technician"), isNull(members.endedAt)));
-  if (found.length !== new Set(crew).size) throw notFound("technician");
-}
