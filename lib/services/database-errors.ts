@@ -5,6 +5,8 @@ type Refusal = { code: string; constraint_name?: string };
 /** What a refused constraint means to the person who ran into it. */
 const CONSTRAINT_WORDS: Record<string, string> = {
   customers_name_unique: "There is already a customer of that name",
+  job_waits_once: "The job waits for that already",
+  jobs_occurrence_once: "The job for this occurrence is there already",
   licenses_number_unique: "That license number is already recorded",
   member_details_email_unique: "Somebody with that e-mail address is already here",
   members_user_unique: "That person is already a member",

@@ -1,3 +1,12 @@
+import { addItem } from "./agreements/add-item";
+import { changeItem } from "./agreements/change-item";
+import { createAgreement } from "./agreements/create-agreement";
+import { endAgreement } from "./agreements/end-agreement";
+import { endItem } from "./agreements/end-item";
+import { getAgreement } from "./agreements/get-agreement";
+import { listAgreements } from "./agreements/list-agreements";
+import { recordCompletion } from "./agreements/record-completion";
+import { updateAgreement } from "./agreements/update-agreement";
 import { listAudit } from "./audit/list-audit";
 import type { Verb } from "./command";
 import { getCompany } from "./company/get-company";
@@ -11,8 +20,18 @@ import { inviteContact } from "./customers/invite-contact";
 import { listCustomers } from "./customers/list-customers";
 import { updateCustomer } from "./customers/update-customer";
 import { find } from "./find/find";
+import { cancelJob } from "./jobs/cancel-job";
 import { createJob } from "./jobs/create-job";
+import { endWait } from "./jobs/end-wait";
+import { getJob } from "./jobs/get-job";
+import { listDue } from "./jobs/list-due";
 import { listJobs } from "./jobs/list-jobs";
+import { makeDue } from "./jobs/make-due";
+import { recordDone } from "./jobs/record-done";
+import { setTerms } from "./jobs/set-terms";
+import { sweepDue } from "./jobs/sweep-due";
+import { updateJob } from "./jobs/update-job";
+import { waitFor } from "./jobs/wait-for";
 import { listDeadLetters } from "./messages/list-dead-letters";
 import { retryDeadLetter } from "./messages/retry-dead-letter";
 import { sendPasswordReset } from "./messages/send-password-reset";
@@ -65,6 +84,21 @@ export const COMMANDS: readonly Verb[] = [
   endContact,
   updateCustomer,
   createJob,
+  addItem,
+  changeItem,
+  createAgreement,
+  endAgreement,
+  endItem,
+  recordCompletion,
+  updateAgreement,
+  cancelJob,
+  endWait,
+  makeDue,
+  recordDone,
+  setTerms,
+  sweepDue,
+  updateJob,
+  waitFor,
   retryDeadLetter,
   sendPasswordReset,
   sendSignInLink,
@@ -103,6 +137,10 @@ export const QUERIES: readonly Verb[] = [
   listCustomers,
   find,
   listJobs,
+  getAgreement,
+  listAgreements,
+  getJob,
+  listDue,
   listDeadLetters,
   getAccount,
   getPerson,

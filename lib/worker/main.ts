@@ -1,6 +1,7 @@
 import { rawClient } from "@/db/client";
 import { log } from "@/lib/log";
 import { answerAccessRequests } from "./access-requests";
+import { dueSweeper } from "./due-sweeps";
 import { runOutbox } from "./outbox-runner";
 
 /** What waits for a time is found by looking; everything else rings the bell. */
@@ -29,6 +30,7 @@ const nextBell = () =>
     };
   });
 
+const sweep = dueSweeper(clock);
 log().info("worker ready");
 while (!stopping) {
   const waiting = nextBell();
@@ -36,6 +38,7 @@ while (!stopping) {
     await answerAccessRequests(clock);
     const taken = await runOutbox(clock, () => !stopping);
     if (taken > 0) continue;
+    await sweep(() => !stopping);
   } catch (error) {
     log().error({ err: error }, "the worker stumbled");
   }

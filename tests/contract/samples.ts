@@ -6,6 +6,7 @@ import { inviteStaff } from "@/lib/services/people/invite-staff";
 import { askForVisit } from "@/lib/services/visits/ask";
 import { givePassword, secondSession, unique, uniqueAddress } from "../factories/company";
 import { deadLetter } from "../factories/messages";
+import { itemFacts, newItem, newJob, newWait } from "../factories/work";
 import { newCustomer, newSite, newVisit, UNLICENSED, type World } from "../factories/world";
 
 const address = { street: "2 Test Street", city: "Chicago", state: "IL", postalCode: "60601" };
@@ -33,6 +34,28 @@ export const SAMPLES: Record<string, Sample> = {
   "account.send-password-reset": (w) => ({ requestId: uuidv7(), memberId: w.technician.memberId }),
   "account.send-sign-in-link": (w) => ({ requestId: uuidv7(), memberId: w.technician.memberId }),
   "account.sign-out-everywhere": () => ({}),
+  "agreement.add-item": async (w) => ({
+    ...itemFacts(w),
+    agreementId: (await newItem(w)).agreementId,
+    lastDoneOn: "2026-03-15",
+  }),
+  "agreement.change-item": async (w) => ({
+    ...itemFacts(w),
+    itemId: (await newItem(w)).itemId,
+    frequency: "semiannual",
+  }),
+  "agreement.create": (w) => ({ customerId: w.customer.customerId, name: unique("Agreement"), startsOn: "2026-01-01" }),
+  "agreement.end": async (w) => ({ agreementId: (await newItem(w)).agreementId, endsOn: "2026-12-31" }),
+  "agreement.end-item": async (w) => ({ itemId: (await newItem(w)).itemId }),
+  "agreement.get": async (w) => ({ agreementId: (await newItem(w)).agreementId }),
+  "agreement.list": () => ({}),
+  "agreement.record-completion": async (w) => ({ itemId: (await newItem(w)).itemId, doneOn: "2026-11-30" }),
+  "agreement.update": async (w) => ({
+    agreementId: (await newItem(w)).agreementId,
+    name: unique("Agreement"),
+    startsOn: "2026-01-01",
+    purchaseOrderNeeded: "on",
+  }),
   "audit.list": () => ({}),
   "company.found": () => ({
     ...company(),
@@ -57,10 +80,23 @@ export const SAMPLES: Record<string, Sample> = {
   "customer.update": (w) => ({ customerId: w.customer.customerId, name: unique("Customer") }),
   "delivery.list-dead": () => ({}),
   "delivery.retry": async (w) => ({ outboxId: await deadLetter(w.company.companyId) }),
+  "due.list": async (w) => {
+    await newItem(w);
+    return {};
+  },
+  "due.sweep": () => ({}),
   "field.day": () => ({}),
   "find.all": () => ({ q: "Site" }),
+  "job.cancel": async (w) => ({ jobId: await newJob(w), reason: "The building closes" }),
   "job.create": (w) => ({ siteId: w.site.siteId, kind: "test", title: unique("Job") }),
+  "job.end-wait": async (w) => ({ waitId: await newWait(w) }),
+  "job.get": (w) => ({ jobId: w.visit.jobId }),
   "job.list": () => ({}),
+  "job.make-due": async (w) => ({ itemId: (await newItem(w)).itemId }),
+  "job.record-done": async (w) => ({ jobId: await newJob(w), doneOn: "2026-11-30" }),
+  "job.set-terms": async (w) => ({ jobId: await newJob(w), purchaseOrder: "PO 4711", limit: "1,250.00" }),
+  "job.update": async (w) => ({ jobId: await newJob(w), kind: "repair", title: unique("Job"), urgent: "on" }),
+  "job.wait": async (w) => ({ jobId: await newJob(w), waitsFor: "parts", person: "Parts counter" }),
   "password.reset": () => ({ password: PASSWORD }),
   "person.accept-invitation": () => ({ password: PASSWORD }),
   "person.change-role": async (w) => ({ memberId: await freshMember(w), role: "dispatcher" }),

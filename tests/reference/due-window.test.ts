@@ -74,13 +74,13 @@ test.each([
  * https://ssr-inc.com/pressroom/compliance-news-tjc-redefines-quarterly-every-3-years-2014 ; those dates are computed.
  */
 describe("hospital accreditor", () => {
-  test.each([
+  test.each<[rule: string, frequency: Frequency, earliest: string, latest: string, mark: string]>([
     ["hospital_by_day", "quarterly", "2026-06-05", "2026-06-25", "published"],
     ["hospital_by_month", "quarterly", "2026-05-21", "2026-07-10", "published"],
     ["hospital_by_day", "semiannual", "2026-08-26", "2026-10-05", "computed"],
     ["hospital_by_day", "annual", "2027-02-13", "2027-04-14", "computed"],
     ["hospital_by_day", "three_yearly", "2029-01-29", "2029-04-29", "from memory: 3 years ± 45 days"],
-  ] as const)("%s, %s, last done 2026-03-15: %s to %s (%s)", (key, frequency, earliest, latest) => {
+  ])("%s, %s, last done 2026-03-15: %s to %s (%s)", (key, frequency, earliest, latest) => {
     const window = dueWindow(schedule(key, frequency, "last_done", "2026-03-15"), done("2026-03-15"));
     expect(window).toMatchObject({ earliest, latest });
   });

@@ -1,4 +1,4 @@
-import { addDays, addMonths, type CalendarDate, daysBetween } from "@/lib/domain/shared/zone";
+import { addDays, addMonths, type CalendarDate, daysBetween, earlierOf, laterOf } from "@/lib/domain/shared/zone";
 import { type IntervalRule, STEPS, type Tolerance } from "./interval-rules";
 import type { Anchor, Frequency } from "./words";
 
@@ -34,7 +34,7 @@ export function dueWindow(schedule: DueSchedule, last: Completion | null): DueWi
   if (!tolerance) throw new RangeError(`${schedule.rule.key} does not speak of ${schedule.frequency}`);
   const target = nextTarget(schedule, last);
   const [earliest, latest] = limits(tolerance, schedule.frequency, target, last);
-  return { earliest, target: target < earliest ? earliest : target > latest ? latest : target, latest };
+  return { earliest, target: earlierOf(laterOf(target, earliest), latest), latest };
 }
 
 /**

@@ -42,6 +42,9 @@ export const addDays = (date: CalendarDate, days: number): CalendarDate => dateO
 export const daysBetween = (from: CalendarDate, to: CalendarDate): number =>
   (midnightUtc(to) - midnightUtc(from)) / DAY_MS;
 
+export const earlierOf = (a: CalendarDate, b: CalendarDate): CalendarDate => (daysBetween(a, b) < 0 ? b : a);
+export const laterOf = (a: CalendarDate, b: CalendarDate): CalendarDate => (daysBetween(a, b) > 0 ? b : a);
+
 /** The same day of the month so many months on (or back); where that month is too short, its last day. */
 export function addMonths(date: CalendarDate, months: number): CalendarDate {
   const at = new Date(midnightUtc(date));
