@@ -2,6 +2,7 @@
 
 import { acceptInvitation } from "@/lib/services/people/accept-invitation";
 import { resetPassword } from "@/lib/services/people/reset-password";
+import { answerVisit } from "@/lib/services/visits/answer";
 import { action } from "@/lib/web/action";
 import { askPasswordReset, leave, linkSignIn, passwordSignIn } from "@/lib/web/sign-in";
 
@@ -14,3 +15,4 @@ export const acceptInvitationAction = action(acceptInvitation, {
   to: () => "/sign-in?from=invitation",
 });
 export const resetPasswordAction = action(resetPassword, { linkField: "token", to: () => "/sign-in?from=reset" });
+export const answerByLinkAction = action(answerVisit, { linkField: "token" });

@@ -1,16 +1,15 @@
+import type { FormAction } from "@/components/form/form";
 import { PageHeader, Section } from "@/components/layout/page-header";
 import { Card, EmptyState } from "@/components/ui/card";
-import { JOB_KIND_WORDS, type JobKind } from "@/lib/domain/jobs/words";
+import { toLocalTime } from "@/lib/domain/shared/zone";
+import { AnswerForm } from "./answer-form";
+import { AnswerGiven, type AskedVisit, AskedVisitFacts, type GivenAnswer, VisitCaution } from "./asked-visit";
 
-type Visit = {
+type Visit = AskedVisit & {
   id: string;
-  startsAt: Date;
-  startsLocal: string;
-  endsLocal: string;
+  zone: string;
   canceledAt: Date | null;
-  site: { name: string };
-  job: { kind: JobKind; title: string };
-  crew: { memberId: string; name: string }[];
+  ask: (GivenAnswer & { id: string }) | null;
 };
 
 type Props = {
@@ -18,18 +17,33 @@ type Props = {
   sites: { id: string; name: string; street: string; city: string }[];
   visits: Visit[];
   now: Date;
+  answer: FormAction;
 };
 
-export function PortalHome({ company, sites, visits, now }: Props) {
+export function PortalHome({ company, sites, visits, now, answer }: Props) {
   const standing = visits.filter((visit) => !visit.canceledAt);
+  const coming = standing.filter((visit) => visit.endsAt > now);
+  const waiting = coming.filter((visit) => visit.ask && !visit.ask.answer);
+  const settled = coming.filter((visit) => !waiting.includes(visit));
   return (
     <>
       <PageHeader title="Your buildings" note={`${company.name}, ${company.phone}`} />
+      {waiting.length > 0 && (
+        <Section title="Waiting for your answer" note="We come once you have said that it can take place.">
+          <VisitCaution />
+          {waiting.map((visit) => (
+            <Card key={visit.id} className="grid gap-4" aria-label={`${visit.job.title}, ${visit.site.name}`}>
+              <AskedVisitFacts visit={visit} />
+              <AnswerForm action={answer} name="askId" value={visit.ask?.id ?? ""} />
+            </Card>
+          ))}
+        </Section>
+      )}
       <Section title="Coming visits">
-        <Visits visits={standing.filter((visit) => visit.startsAt >= now)} none="No visit is planned" />
+        <Visits visits={settled} none={waiting.length > 0 ? "No other visit is planned" : "No visit is planned"} />
       </Section>
       <Section title="Past visits">
-        <Visits visits={standing.filter((visit) => visit.startsAt < now).reverse()} none="No visit yet" />
+        <Visits visits={standing.filter((visit) => visit.endsAt <= now).reverse()} none="No visit yet" />
       </Section>
       <Section title="Sites">
         {sites.length === 0 && (
@@ -58,15 +72,11 @@ function Visits({ visits, none }: { visits: Visit[]; none: string }) {
     <ol className="grid gap-2">
       {visits.map((visit) => (
         <li key={visit.id}>
-          <Card className="p-3 sm:p-3">
-            <p className="figures">
-              {visit.startsLocal.replace("T", " ")}–{visit.endsLocal.slice(11)}
-            </p>
-            <p className="font-semibold">{visit.site.name}</p>
-            <p>
-              {JOB_KIND_WORDS[visit.job.kind]}: {visit.job.title}
-            </p>
-            <p className="text-sm text-muted">{visit.crew.map((person) => person.name).join(", ")}</p>
+          <Card className="grid gap-3 p-3 sm:p-3">
+            <AskedVisitFacts visit={visit} />
+            {visit.ask && (
+              <AnswerGiven ask={visit.ask} on={visit.ask.answeredAt && toLocalTime(visit.ask.answeredAt, visit.zone)} />
+            )}
           </Card>
         </li>
       ))}

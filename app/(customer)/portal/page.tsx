@@ -6,6 +6,7 @@ import { getFrame } from "@/lib/services/company/get-frame";
 import { getPortal } from "@/lib/services/visits/get-portal";
 import { read } from "@/lib/web/page";
 import { leaveAction } from "../../(public)/actions";
+import { answerAction } from "./actions";
 
 export const metadata: Metadata = { title: "Your buildings" };
 
@@ -19,7 +20,7 @@ export default async function PortalPage() {
       items={[{ href: paths.portal, label: "Your buildings" }]}
       leave={leaveAction}
     >
-      <PortalHome {...portal} now={new Date()} />
+      <PortalHome {...portal} now={new Date()} answer={answerAction} />
     </Shell>
   );
 }
