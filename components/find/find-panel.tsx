@@ -7,9 +7,7 @@ import { useDeferredValue, useState } from "react";
 import type { Found } from "@/lib/domain/shared/found";
 import { paths } from "@/lib/domain/shared/paths";
 import { findQuery } from "@/lib/queries/find";
-
-const ITEM =
-  "cursor-pointer rounded-md px-3 py-2 aria-selected:bg-ground aria-selected:shadow-[inset_3px_0_0_var(--still)]";
+import { FOUND, FoundSite } from "./found-site";
 
 export function FindPanel({ onGo }: { onGo: () => void }) {
   const [typed, setTyped] = useState("");
@@ -44,20 +42,7 @@ function Results({ found, go }: { found: Found; go: (href: string) => void }) {
   return (
     <>
       {found.sites.map((site) => (
-        <Command.Item key={site.id} value={site.id} onSelect={() => go(paths.site(site.id))} className={ITEM}>
-          <span className="font-semibold">{site.name}</span>
-          <span className="block text-sm text-muted">
-            {site.street}, {site.city}
-          </span>
-          <span className="figures block text-sm">
-            last {when(site.lastVisit)} · next {when(site.nextVisit)}
-          </span>
-          {site.contacts.map((contact) => (
-            <span key={contact.name} className="block text-sm">
-              {contact.name} <span className="figures">{contact.phone}</span>
-            </span>
-          ))}
-        </Command.Item>
+        <FoundSite key={site.id} site={site} go={go} />
       ))}
       {found.customers.map((row) => (
         <Line key={row.id} id={row.id} kind="Customer" words={row.name} onSelect={() => go(paths.customer(row.id))} />
@@ -77,7 +62,7 @@ function Results({ found, go }: { found: Found; go: (href: string) => void }) {
           id={row.id}
           kind={`Job ${row.number}`}
           words={row.title}
-          onSelect={() => go(paths.site(row.siteId))}
+          onSelect={() => go(paths.job(row.id))}
         />
       ))}
       {found.people.map((row) => (
@@ -87,11 +72,9 @@ function Results({ found, go }: { found: Found; go: (href: string) => void }) {
   );
 }
 
-const when = (local: string | null) => local?.replace("T", " ") ?? "none";
-
 function Line({ id, kind, words, onSelect }: { id: string; kind: string; words: string; onSelect: () => void }) {
   return (
-    <Command.Item value={id} onSelect={onSelect} className={ITEM}>
+    <Command.Item value={id} onSelect={onSelect} className={FOUND}>
       <span className="text-sm text-muted">{kind}</span> <span className="font-semibold">{words}</span>
     </Command.Item>
   );

@@ -20,6 +20,7 @@ import { inviteContact } from "./customers/invite-contact";
 import { listCustomers } from "./customers/list-customers";
 import { updateCustomer } from "./customers/update-customer";
 import { find } from "./find/find";
+import { getSiteBrief } from "./find/get-site-brief";
 import { cancelJob } from "./jobs/cancel-job";
 import { createJob } from "./jobs/create-job";
 import { endWait } from "./jobs/end-wait";
@@ -136,6 +137,7 @@ export const QUERIES: readonly Verb[] = [
   getCustomer,
   listCustomers,
   find,
+  getSiteBrief,
   listJobs,
   getAgreement,
   listAgreements,

@@ -87,6 +87,7 @@ export const SAMPLES: Record<string, Sample> = {
   "due.sweep": () => ({}),
   "field.day": () => ({}),
   "find.all": () => ({ q: "Site" }),
+  "find.site": (w) => ({ siteId: w.site.siteId }),
   "job.cancel": async (w) => ({ jobId: await newJob(w), reason: "The building closes" }),
   "job.create": (w) => ({ siteId: w.site.siteId, kind: "test", title: unique("Job") }),
   "job.end-wait": async (w) => ({ waitId: await newWait(w) }),

@@ -1,14 +1,13 @@
-import { and, asc, desc, eq, gte, ilike, inArray, isNull, lt, ne, or, sql } from "drizzle-orm";
+import { and, desc, eq, ilike, isNull, ne, or, sql } from "drizzle-orm";
 import { z } from "zod";
 import type { Tx } from "@/db/client";
 import { contacts, customers } from "@/db/schema/customers";
 import { jobs } from "@/db/schema/jobs";
 import { members } from "@/db/schema/people";
 import { sites } from "@/db/schema/sites";
-import { visits } from "@/db/schema/visits";
 import { query } from "@/lib/services/command";
 import { containing } from "@/lib/services/paging";
-import { contactsOfSites } from "@/lib/services/sites/site-contacts";
+import { BRIEF, siteBriefs } from "./site-briefs";
 
 const MOST = 8;
 
@@ -48,7 +47,7 @@ export const find = query({
         .orderBy(contacts.name)
         .limit(MOST),
       jobs: await tx
-        .select({ id: jobs.id, number: jobs.number, title: jobs.title, siteId: jobs.siteId })
+        .select({ id: jobs.id, number: jobs.number, title: jobs.title })
         .from(jobs)
         .where(or(ilike(jobs.title, words), digits ? eq(sql`${jobs.number}::text`, digits) : undefined))
         .orderBy(desc(jobs.number))
@@ -65,30 +64,10 @@ export const find = query({
 
 async function foundSites(tx: Tx, words: string, now: Date) {
   const found = await tx
-    .select({ id: sites.id, name: sites.name, street: sites.street, city: sites.city, state: sites.state })
+    .select(BRIEF)
     .from(sites)
     .where(or(ilike(sites.name, words), ilike(sites.street, words), ilike(sites.city, words)))
     .orderBy(sites.name)
     .limit(MOST);
-  if (found.length === 0) return [];
-  const ids = found.map((site) => site.id);
-  const timed = { siteId: visits.siteId, startsLocal: visits.startsLocal };
-  const standing = and(inArray(visits.siteId, ids), isNull(visits.canceledAt));
-  const last = await tx
-    .selectDistinctOn([visits.siteId], timed)
-    .from(visits)
-    .where(and(standing, lt(visits.startsAt, now)))
-    .orderBy(visits.siteId, desc(visits.startsAt));
-  const next = await tx
-    .selectDistinctOn([visits.siteId], timed)
-    .from(visits)
-    .where(and(standing, gte(visits.startsAt, now)))
-    .orderBy(visits.siteId, asc(visits.startsAt));
-  const people = await contactsOfSites(tx, ids, now);
-  return found.map((site) => ({
-    ...site,
-    lastVisit: last.find((visit) => visit.siteId === site.id)?.startsLocal ?? null,
-    nextVisit: next.find((visit) => visit.siteId === site.id)?.startsLocal ?? null,
-    contacts: people.filter((person) => person.siteId === site.id).slice(0, 3),
-  }));
+  return siteBriefs(tx, found, now);
 }
