@@ -26,6 +26,15 @@ export const zonesOfCountry = (country: string): Zone[] => moment.tz.zonesForCou
  */
 export const toInstant = (local: LocalTime, zone: Zone): Date => moment.tz(local, LOCAL_FORMAT, true, zone).toDate();
 
+/** The first instant at which the clock there shows the reading, or, where it is skipped, has passed it. */
+export function readingReached(local: LocalTime, zone: Zone): Date {
+  const at = toInstant(local, zone);
+  if (toLocalTime(at, zone) === local) return at;
+  const changes = moment.tz.zone(zone)?.untils ?? [];
+  const change = changes.filter((ms): ms is number => ms !== null && ms <= at.getTime()).at(-1);
+  return change === undefined ? at : new Date(change);
+}
+
 export const toLocalTime = (instant: Date, zone: Zone): LocalTime => moment.tz(instant, zone).format(LOCAL_FORMAT);
 
 export const calendarDate = (instant: Date, zone: Zone): CalendarDate => toLocalTime(instant, zone).slice(0, 10);
