@@ -1,11 +1,10 @@
 import { notFound } from "next/navigation";
+import { frame } from "@/app/frame";
 import { FindButton } from "@/components/find/find-button";
 import type { NavItem } from "@/components/layout/nav-links";
 import { Shell } from "@/components/layout/shell";
 import { paths } from "@/lib/domain/shared/paths";
 import type { Role } from "@/lib/domain/shared/roles";
-import { getFrame } from "@/lib/services/company/get-frame";
-import { read } from "@/lib/web/page";
 import { leaveAction } from "../(public)/actions";
 
 const EVERYONE: readonly NavItem[] = [
@@ -28,7 +27,7 @@ const NAV: Partial<Record<Role, readonly NavItem[]>> = {
 };
 
 export default async function OfficeLayout({ children }: LayoutProps<"/">) {
-  const { company, role, personName } = await read(getFrame);
+  const { company, role, personName } = await frame();
   const items = NAV[role];
   if (!items) notFound();
   return (

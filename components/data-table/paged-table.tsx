@@ -1,63 +1,81 @@
-import Link from "next/link";
+import { Search as SearchGlyph } from "lucide-react";
+import Form from "next/form";
+import { useId } from "react";
 import { Button } from "@/components/ui/button";
-import { Input } from "@/components/ui/input";
+import { Input, Select } from "@/components/ui/input";
+import { Pagination } from "@/components/ui/pagination";
+import { hrefWith, type Search } from "./address";
 
-type Search = Record<string, string | string[] | undefined>;
-
-export function hrefWith(path: string, search: Search, change: Record<string, string | null>): string {
-  const params = new URLSearchParams();
-  for (const [key, value] of Object.entries({ ...search, ...change })) {
-    if (typeof value === "string" && value !== "") params.set(key, value);
-  }
-  const text = params.toString();
-  return text ? `${path}?${text}` : path;
-}
-
-/** Filters live in the address, so a list can be sent to a colleague. */
-export function SearchBar({
-  path,
-  q,
-  label,
-  children,
-}: {
+type SearchBarProps = {
   path: string;
   q?: string;
   label: string;
+  /** The order to keep while the filters change. */
+  sort?: Search["sort"];
+  /** FilterSelects. */
   children?: React.ReactNode;
-}) {
+};
+
+/** Filters live in the address, so a list can be sent to a colleague. */
+export function SearchBar({ path, q, label, sort, children }: SearchBarProps) {
+  const id = useId();
   return (
-    <form action={path} method="get" className="flex flex-wrap items-end gap-2" data-print="off">
-      <label className="grid gap-1" htmlFor="list-search">
-        <span className="text-sm text-muted">{label}</span>
-        <Input id="list-search" type="search" name="q" defaultValue={q} className="w-64 max-w-full" />
-      </label>
+    <Form action={path} role="search" className="flex flex-wrap items-end gap-2" data-print="off">
+      {typeof sort === "string" && <input type="hidden" name="sort" value={sort} />}
+      <div className="grid gap-1 max-sm:w-full">
+        <label htmlFor={id} className="text-sm text-muted">
+          {label}
+        </label>
+        <Input id={id} key={q} type="search" name="q" defaultValue={q} className="sm:w-64" />
+      </div>
       {children}
-      <Button type="submit">Search</Button>
-    </form>
+      <Button type="submit">
+        <SearchGlyph aria-hidden className="size-4" />
+        Search
+      </Button>
+    </Form>
   );
 }
 
-type PagerProps = { path: string; search: Search; page: number; pageSize: number; total: number };
+type FilterProps = {
+  name: string;
+  label: string;
+  search: Search;
+  options: readonly { value: string; label: string }[];
+  /** The choice that filters nothing. */
+  all: string;
+};
 
-export function Pager({ path, search, page, pageSize, total }: PagerProps) {
-  const last = Math.max(1, Math.ceil(total / pageSize));
-  const link = (to: number, word: string) =>
-    to >= 1 && to <= last ? (
-      <Button asChild size="small">
-        <Link href={hrefWith(path, search, { page: to === 1 ? null : String(to) })}>{word}</Link>
-      </Button>
-    ) : (
-      <Button size="small" disabled>
-        {word}
-      </Button>
-    );
+export function FilterSelect({ name, label, search, options, all }: FilterProps) {
+  const id = useId();
+  const chosen = typeof search[name] === "string" ? search[name] : "";
   return (
-    <nav aria-label="Pages" className="flex flex-wrap items-center gap-3" data-print="off">
-      {link(page - 1, "Previous")}
-      <span className="figures text-sm">
-        {page} of {last} · {total} in all
-      </span>
-      {link(page + 1, "Next")}
-    </nav>
+    <div className="grid gap-1 max-sm:grow">
+      <label htmlFor={id} className="text-sm text-muted">
+        {label}
+      </label>
+      <Select id={id} key={chosen} name={name} defaultValue={chosen}>
+        <option value="">{all}</option>
+        {options.map(({ value, label: word }) => (
+          <option key={value} value={value}>
+            {word}
+          </option>
+        ))}
+      </Select>
+    </div>
+  );
+}
+
+export type PageOf = { page: number; pageSize: number; total: number };
+
+export function Pager({ path, search, page, pageSize, total }: PageOf & { path: string; search: Search }) {
+  return (
+    <Pagination
+      page={page}
+      last={Math.max(1, Math.ceil(total / pageSize))}
+      hrefOf={(to) => hrefWith(path, search, { page: to === 1 ? null : String(to) })}
+    >
+      <span className="figures">{total}</span> in all
+    </Pagination>
   );
 }

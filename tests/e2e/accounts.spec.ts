@@ -97,7 +97,7 @@ test("a link by e-mail signs in once, and only by the button", async ({ page, br
   await theirs.getByText("Sign in by a link instead").click();
   await theirs.getByLabel("Where should the link go?").fill(person.email);
   await theirs.getByRole("button", { name: "Send me a link" }).click();
-  await expect(theirs.getByRole("status")).toContainText("If we know that address");
+  await expect(theirs.getByText("If we know that address")).toBeVisible();
   const link = (await nextLetter(person.email, before)).links[0] ?? "";
   // A mail scanner opens the address first; that spends nothing.
   expect((await fetch(link)).status).toBe(200);

@@ -1,44 +1,46 @@
 import type { Metadata } from "next";
-import { Pager, SearchBar } from "@/components/data-table/paged-table";
+import { frame } from "@/app/frame";
+import { hrefWith } from "@/components/data-table/address";
+import { DataTable } from "@/components/data-table/data-table";
+import { SearchBar } from "@/components/data-table/paged-table";
 import { PageHeader } from "@/components/layout/page-header";
-import { Table, Td, Th } from "@/components/ui/table";
+import { EmptyState } from "@/components/ui/card";
 import { paths } from "@/lib/domain/shared/paths";
 import { toLocalTime } from "@/lib/domain/shared/zone";
 import { listAudit } from "@/lib/services/audit/list-audit";
-import { getCompany } from "@/lib/services/company/get-company";
 import { read } from "@/lib/web/page";
 
 export const metadata: Metadata = { title: "Audit trail" };
 
 export default async function AuditPage({ searchParams }: PageProps<"/audit">) {
   const search = await searchParams;
-  const { rows, ...page } = await read(listAudit, search);
-  const { zone } = await read(getCompany);
+  const list = await read(listAudit, search);
+  const { zone } = (await frame()).company;
+  const path = paths.audit;
   return (
     <>
       <PageHeader title="Audit trail" note={`Who did what. Times in ${zone}.`} />
-      <SearchBar path={paths.audit} q={String(search.q ?? "")} label="Verb" />
-      <Table>
-        <thead>
-          <tr>
-            <Th>When</Th>
-            <Th>Who</Th>
-            <Th>What</Th>
-            <Th>Of</Th>
-          </tr>
-        </thead>
-        <tbody>
-          {rows.map(({ entry, person }) => (
-            <tr key={entry.id}>
-              <Td className="figures">{toLocalTime(entry.at, zone).replace("T", " ")}</Td>
-              <Td>{person ?? entry.actorKind}</Td>
-              <Td className="figures">{entry.command}</Td>
-              <Td>{entry.entity}</Td>
-            </tr>
-          ))}
-        </tbody>
-      </Table>
-      <Pager path={paths.audit} search={search} {...page} />
+      <DataTable
+        {...list}
+        {...{ path, search }}
+        caption="Audit entries"
+        rowKey={({ entry }) => entry.id}
+        exportHref={hrefWith(paths.listFile("audit"), search, { page: null })}
+        filters={<SearchBar path={path} q={String(search.q ?? "")} label="Verb" sort={search.sort} />}
+        empty={<EmptyState title="Nothing has happened yet" />}
+        columns={[
+          {
+            key: "at",
+            header: "When",
+            sortable: true,
+            figures: true,
+            cell: ({ entry }) => toLocalTime(entry.at, zone).replace("T", " "),
+          },
+          { key: "who", header: "Who", cell: ({ entry, person }) => person ?? entry.actorKind },
+          { key: "what", header: "What", figures: true, cell: ({ entry }) => entry.command },
+          { key: "of", header: "Of", cell: ({ entry }) => entry.entity },
+        ]}
+      />
     </>
   );
 }

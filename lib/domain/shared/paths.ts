@@ -27,6 +27,8 @@ export const paths = {
   settings: "/settings",
   deliveries: "/settings/deliveries",
   field: "/field",
+  /** The same list as a file, with the filters and order of the address. */
+  listFile: (list: "sites" | "customers" | "people" | "audit") => `/${list}/export.csv`,
   portal: "/portal",
   portalSite: (id: string) => `/portal/sites/${id}`,
 } as const;

@@ -96,3 +96,6 @@ export type LinkGrant = (typeof LINK_GRANTS)[number];
 
 export const WORKER_GRANTS: readonly Permission[] = ["due:sweep", "mail:send"];
 export const OPERATOR_GRANTS: readonly Permission[] = ["company:found"];
+
+/** Whether a screen shows the way to something; the verb decides for itself. */
+export const mayDo = (role: Role, permission: Permission): boolean => ROLE_GRANTS[role].includes(permission);

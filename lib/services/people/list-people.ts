@@ -1,16 +1,21 @@
-import { and, count, eq, ilike, isNotNull, isNull, ne, or, type SQL } from "drizzle-orm";
+import { and, asc, count, eq, ilike, inArray, isNotNull, isNull, ne, or, type SQL } from "drizzle-orm";
 import { z } from "zod";
 import { licenses, memberDetails, members } from "@/db/schema/people";
 import { query } from "@/lib/services/command";
-import { containing, offsetOf, PAGE_SIZE, PageInput } from "@/lib/services/paging";
+import { containing, offsetOf, orderBy, PageInput, sortInput } from "@/lib/services/paging";
 
-const ListPeopleInput = PageInput.extend({ show: z.enum(["current", "ended"]).catch("current").default("current") });
+const SORTS = { name: members.name, role: members.role };
+
+const ListPeopleInput = PageInput.extend({
+  show: z.enum(["current", "ended"]).catch("current").default("current"),
+  sort: sortInput(["name", "role"]),
+});
 
 export const listPeople = query({
   name: "person.list",
   needs: "person:read",
   input: ListPeopleInput,
-  async run({ tx }, { page, q, show }) {
+  async run({ tx }, { page, pageSize, q, show, sort }) {
     const conditions: (SQL | undefined)[] = [
       ne(members.role, "customer"),
       show === "current" ? isNull(members.endedAt) : isNotNull(members.endedAt),
@@ -30,16 +35,17 @@ export const listPeople = query({
       .from(members)
       .innerJoin(memberDetails, onDetails)
       .where(where)
-      .orderBy(members.name, members.id)
-      .limit(PAGE_SIZE)
-      .offset(offsetOf(page));
+      .orderBy(...orderBy(sort, SORTS, [asc(members.name), asc(members.id)]))
+      .limit(pageSize)
+      .offset(offsetOf(page, pageSize));
     const [all] = await tx.select({ total: count() }).from(members).innerJoin(memberDetails, onDetails).where(where);
-    const held = await tx.select().from(licenses);
+    const shown = rows.map((row) => row.id);
+    const held = shown.length > 0 ? await tx.select().from(licenses).where(inArray(licenses.memberId, shown)) : [];
     return {
       rows: rows.map((row) => ({ ...row, licenses: held.filter((license) => license.memberId === row.id) })),
       total: all?.total ?? 0,
       page,
-      pageSize: PAGE_SIZE,
+      pageSize,
     };
   },
 });
