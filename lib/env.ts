@@ -5,6 +5,8 @@ export const EnvSchema = z.object({
   /** The application's role: owns nothing, cannot bypass row-level security. */
   DATABASE_URL: z.url(),
   AUTH_SECRET: z.string().min(32),
+  /** Seals sites' codes: 32 bytes in base64. Lost or changed, they cannot be read any more. */
+  SECRETS_KEY: z.base64().length(44, "32 bytes in base64: openssl rand -base64 32"),
   APP_URL: z.url(),
   SMTP_URL: z.url(),
   MAIL_FROM: z.string().min(3).default("Coastdown <no-reply@coastdown.example>"),

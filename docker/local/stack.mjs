@@ -30,9 +30,10 @@ function note(purpose, change) {
   writeState(file, { ...state, ...change });
 }
 
-function authSecret(folder) {
-  const file = join(folder, "auth-secret.json");
-  const secret = readState(file, undefined) ?? randomBytes(32).toString("base64url");
+/** Made once and kept beside the databases: with another one nobody stays signed in, and no code can be read. */
+function keptSecret(folder, name, encoding) {
+  const file = join(folder, `${name}.json`);
+  const secret = readState(file, undefined) ?? randomBytes(32).toString(encoding);
   writeState(file, secret);
   return secret;
 }
@@ -88,7 +89,8 @@ export async function bringUp({ purpose, urls, programs, held, show = false }) {
   const env = {
     DATABASE_URL: urls.DATABASE_URL,
     DATABASE_OWNER_URL: undefined,
-    AUTH_SECRET: process.env.AUTH_SECRET ?? authSecret(folderFor(purpose)),
+    AUTH_SECRET: process.env.AUTH_SECRET ?? keptSecret(folderFor(purpose), "auth-secret", "base64url"),
+    SECRETS_KEY: process.env.SECRETS_KEY ?? keptSecret(folderFor(purpose), "secrets-key", "base64"),
     APP_URL: address,
     SMTP_URL: smtpUrl,
     DEMO: process.env.DEMO ?? "on",

@@ -13,9 +13,13 @@ test(".env.example names every setting that the program reads, and no other", ()
   expect(named.sort()).toEqual([...new Set([...Object.keys(EnvSchema.shape), ...readByName])].sort());
 });
 
-test("the example's values are accepted, once a secret is filled in", () => {
+test("the example's values are accepted, once the secrets are filled in", () => {
   const example = readFileSync(join(root, ".env.example"), "utf8");
   const values = [...example.matchAll(/^([A-Z_]+)="?([^"\n]*)"?$/gm)].map(([, name, value]) => [name, value]);
-  const filled = { ...Object.fromEntries(values), AUTH_SECRET: "x".repeat(32) };
+  const filled = {
+    ...Object.fromEntries(values),
+    AUTH_SECRET: "x".repeat(32),
+    SECRETS_KEY: Buffer.alloc(32).toString("base64"),
+  };
   expect(EnvSchema.safeParse(filled).error).toBeUndefined();
 });

@@ -34,7 +34,7 @@ const RULES: Rule[] = [
   { folder: "lib/services/demo-accounts.ts", own: ["db/demo/accounts.ts", "lib/env.ts"], packages: [] },
   {
     folder: "lib/services",
-    own: ["lib/domain", "db", "lib/auth/actor.ts", "lib/auth/password.ts", "lib/errors.ts"],
+    own: ["lib/domain", "db", "lib/auth/actor.ts", "lib/auth/password.ts", "lib/auth/secrets.ts", "lib/errors.ts"],
     packages: ["drizzle-orm", "zod", "uuid", "node:crypto"],
   },
   {

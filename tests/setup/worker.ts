@@ -8,6 +8,7 @@ for (const name of ["DATABASE_URL", "DATABASE_OWNER_URL"]) {
 }
 Object.assign(process.env, {
   AUTH_SECRET: "only-for-tests-only-for-tests-only-for-tests",
+  SECRETS_KEY: Buffer.from("only-for-tests-only-for-tests-32").toString("base64"),
   APP_URL: "http://localhost:3000",
   SMTP_URL: "smtp://127.0.0.1:1025",
   NODE_ENV: "test",
