@@ -2,7 +2,8 @@ import { Badge } from "@/components/ui/badge";
 import { Callout } from "@/components/ui/card";
 import { dateWords } from "@/lib/domain/shared/zone";
 import { FUNCTION_WORDS, type SystemFunction } from "@/lib/domain/systems/words";
-import { clockOf, spanWords } from "@/lib/domain/visits/times";
+import { clockOf } from "@/lib/domain/visits/clock";
+import { spanWords } from "@/lib/domain/visits/times";
 import { ANSWER_WORDS, type Answer, CHANNEL_WORDS, type Channel } from "@/lib/domain/visits/words";
 
 export type AskedVisit = {

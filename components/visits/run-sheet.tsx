@@ -1,62 +1,92 @@
-import Link from "next/link";
+"use client";
+
+import { useQuery } from "@tanstack/react-query";
+import { useRef, useState } from "react";
 import { EmptyState } from "@/components/ui/card";
-import { JOB_KIND_WORDS, type JobKind } from "@/lib/domain/jobs/words";
-import { paths } from "@/lib/domain/shared/paths";
+import { placesQuery, type Sheet, type SheetVisit, sheetQuery } from "@/lib/queries/visits";
+import { BookingPanel, type Spot } from "./booking-panel";
+import { DayGrid } from "./day-grid";
+import { type TakenUp, wantedOf } from "./taken-up";
+import { TakenUpBar } from "./taken-up-bar";
+import { Tray } from "./tray";
+import { VisitPanel } from "./visit-panel";
 
-type Visit = {
-  id: string;
-  startsLocal: string;
-  endsLocal: string;
-  canceledAt: Date | null;
-  site: { id: string; name: string; city: string };
-  job: { number: number; kind: JobKind; title: string };
-  crew: { memberId: string; name: string; lead: boolean }[];
-};
+/** A day of all crews: take a job up from the tray, and every place says whether it can go there and what it costs. */
+export function RunSheet({ initial, mayWrite }: { initial: Sheet; mayWrite: boolean }) {
+  const { data: sheet = initial } = useQuery(sheetQuery(initial.date, initial));
+  const [taken, setTaken] = useState<TakenUp | null>(null);
+  const [spot, setSpot] = useState<Spot | null>(null);
+  const [open, setOpen] = useState<SheetVisit | null>(null);
+  const cameFrom = useRef<HTMLElement | null>(null);
+  const wish = taken && { ...wantedOf(taken), date: initial.date, helpers: taken.helpers, minutes: taken.minutes };
+  const { data: places, error } = useQuery(placesQuery(wish));
 
-type Props = { technicians: { id: string; name: string }[]; visits: Visit[] };
+  const takeUp = (what: TakenUp) => {
+    cameFrom.current = document.activeElement instanceof HTMLElement ? document.activeElement : null;
+    setTaken(what);
+  };
+  const putBack = () => {
+    setTaken(null);
+    setSpot(null);
+    cameFrom.current?.focus();
+  };
 
-/** One column per person, time running down. */
-export function RunSheet({ technicians, visits }: Props) {
-  const standing = visits.filter((visit) => !visit.canceledAt);
-  if (technicians.length === 0) {
-    return <EmptyState title="No technicians yet">Invite them under People.</EmptyState>;
-  }
+  if (sheet.technicians.length === 0)
+    return <EmptyState title="No technicians yet">Invite them under People; then visits can be booked.</EmptyState>;
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard (WCAG 2.1.1)
-    <section className="overflow-x-auto pb-2" tabIndex={0} aria-label="Visits by technician">
-      <ol className="grid auto-cols-[minmax(12rem,1fr)] grid-flow-col gap-2">
-        {technicians.map((technician) => (
-          <li key={technician.id} className="grid content-start gap-2 border-l border-line pl-2">
-            <h2 className="sticky top-0 font-bold">{technician.name}</h2>
-            <DayOf visits={standing.filter((visit) => visit.crew.some((one) => one.memberId === technician.id))} />
-          </li>
-        ))}
-      </ol>
-    </section>
-  );
-}
-
-function DayOf({ visits }: { visits: Visit[] }) {
-  if (visits.length === 0) return <p className="text-sm text-muted">No visits</p>;
-  return (
-    <ol className="grid gap-2">
-      {visits.map((visit) => (
-        <li key={visit.id} className="rounded-md border border-line border-l-4 border-l-settled bg-surface p-2">
-          <p className="figures text-sm">
-            {visit.startsLocal.slice(11)}–{visit.endsLocal.slice(11)}
-          </p>
-          <Link href={paths.site(visit.site.id)} className="font-semibold hover:underline">
-            {visit.site.name}
-          </Link>
-          <p className="text-sm">
-            {JOB_KIND_WORDS[visit.job.kind]} <span className="figures">{visit.job.number}</span>
-          </p>
-          <p className="text-sm text-muted">{visit.job.title}</p>
-          {visit.crew.length > 1 && (
-            <p className="text-sm">with {visit.crew.map((one) => one.name.split(" ")[0]).join(", ")}</p>
-          )}
-        </li>
-      ))}
-    </ol>
+    <div className="grid items-start gap-4 xl:grid-cols-[18rem_1fr]">
+      {mayWrite && (
+        <Tray
+          tray={sheet.tray}
+          takenId={taken?.job?.id ?? null}
+          onTake={(job) => takeUp({ job, helpers: [], minutes: job.visitMinutes })}
+        />
+      )}
+      <div className="grid min-w-0 gap-3">
+        {taken && (
+          <TakenUpBar
+            taken={taken}
+            places={places}
+            problem={error?.message}
+            technicians={sheet.technicians}
+            onChange={setTaken}
+            onPutBack={putBack}
+          />
+        )}
+        <DayGrid
+          sheet={sheet}
+          places={taken ? places : undefined}
+          lifted={taken?.visit?.id}
+          onPlace={setSpot}
+          onOpen={setOpen}
+          onPutBack={taken ? putBack : undefined}
+        />
+      </div>
+      {taken && spot && places && (
+        <BookingPanel
+          taken={taken}
+          spot={spot}
+          places={places}
+          technicians={sheet.technicians}
+          onClose={() => setSpot(null)}
+          onDone={() => {
+            setSpot(null);
+            setTaken(null);
+          }}
+        />
+      )}
+      {open && (
+        <VisitPanel
+          visit={open}
+          others={sheet.visits.filter((visit) => visit.id !== open.id && !visit.canceledAt)}
+          mayWrite={mayWrite}
+          onClose={() => setOpen(null)}
+          onMove={(visit, minutes) => {
+            setOpen(null);
+            takeUp({ visit, helpers: visit.crew.filter((one) => !one.lead).map((one) => one.memberId), minutes });
+          }}
+        />
+      )}
+    </div>
   );
 }

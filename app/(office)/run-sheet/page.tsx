@@ -4,7 +4,9 @@ import { PageHeader } from "@/components/layout/page-header";
 import { Button } from "@/components/ui/button";
 import { RunSheet } from "@/components/visits/run-sheet";
 import { paths } from "@/lib/domain/shared/paths";
+import { ROLE_GRANTS } from "@/lib/domain/shared/permissions";
 import { addDays, dateWords } from "@/lib/domain/shared/zone";
+import { getFrame } from "@/lib/services/company/get-frame";
 import { getRunSheet } from "@/lib/services/visits/get-run-sheet";
 import { read } from "@/lib/web/page";
 
@@ -13,6 +15,7 @@ export const metadata: Metadata = { title: "Run sheet" };
 export default async function RunSheetPage({ searchParams }: PageProps<"/run-sheet">) {
   const { date } = await searchParams;
   const sheet = await read(getRunSheet, { date });
+  const { role } = await read(getFrame);
   const to = (day: string, word: string) => (
     <Button asChild>
       <Link href={paths.runSheet(day)}>{word}</Link>
@@ -22,7 +25,7 @@ export default async function RunSheetPage({ searchParams }: PageProps<"/run-she
     <>
       <PageHeader
         title={`Run sheet, ${dateWords(sheet.date)}`}
-        note={`${sheet.visits.length} visits`}
+        note={`${sheet.visits.filter((visit) => !visit.canceledAt).length} visits`}
         actions={
           <>
             {to(addDays(sheet.date, -1), "Day before")}
@@ -31,7 +34,7 @@ export default async function RunSheetPage({ searchParams }: PageProps<"/run-she
           </>
         }
       />
-      <RunSheet technicians={sheet.technicians} visits={sheet.visits} />
+      <RunSheet key={sheet.date} initial={sheet} mayWrite={ROLE_GRANTS[role].includes("visit:write")} />
     </>
   );
 }

@@ -2,6 +2,7 @@ import { and, eq, isNull } from "drizzle-orm";
 import type { Tx } from "@/db/client";
 import { companies } from "@/db/schema/company";
 import { memberDetails, members } from "@/db/schema/people";
+import { attendances } from "@/db/schema/windows";
 import { bandsOf, startsOf } from "@/lib/domain/planning/bands";
 import { costOf, type Errand } from "@/lib/domain/planning/cost";
 import { addDays, startOfDate } from "@/lib/domain/shared/zone";
@@ -77,10 +78,10 @@ export const getPlaces = query({
         ],
         cost: costOf({ span: start.span, site, home: lead, errands: own, zone: company.zone, latest: due.latest }),
       }));
-      return { memberId: lead.id, bands: bandsOf(judged) };
+      return { memberId: lead.id, name: lead.name, bands: bandsOf(judged) };
     });
     return {
-      zone: site.zone,
+      site: { name: site.name, zone: site.zone },
       minutes,
       functions,
       crewSize: job.crewSize,
@@ -88,6 +89,7 @@ export const getPlaces = query({
       starts: starts.map(({ at, local, liveBlocks }) => ({ at, local, liveBlocks })),
       windows: windows.spans.filter((open) => open.functions.some((one) => functions.includes(one))),
       columns,
+      standBy: await standBy(tx, site.id),
       contacts: (await contactsOfSites(tx, [site.id], now)).map(({ id, name, email, phone }) => ({
         id,
         name,
@@ -98,10 +100,23 @@ export const getPlaces = query({
   },
 });
 
+/** Who must stand by at the site while given functions operate. */
+const standBy = (tx: Tx, siteId: string) =>
+  tx
+    .select({ party: attendances.party, functions: attendances.functions })
+    .from(attendances)
+    .where(and(eq(attendances.siteId, siteId), isNull(attendances.endedAt)))
+    .orderBy(attendances.party);
+
 /** Everybody who goes out, with home for the first way of the day. */
 const technicians = (tx: Tx) =>
   tx
-    .select({ id: members.id, latitude: memberDetails.homeLatitude, longitude: memberDetails.homeLongitude })
+    .select({
+      id: members.id,
+      name: members.name,
+      latitude: memberDetails.homeLatitude,
+      longitude: memberDetails.homeLongitude,
+    })
     .from(members)
     .innerJoin(
       memberDetails,

@@ -6,13 +6,16 @@ import { jobs, jobWaits } from "@/db/schema/jobs";
 import { members } from "@/db/schema/people";
 import { sites } from "@/db/schema/sites";
 import { visits } from "@/db/schema/visits";
+import type { WaitsFor } from "@/lib/domain/jobs/words";
 import { calendarDateText } from "@/lib/domain/shared/inputs";
-import { addDays, calendarDate, daysBetween, startOfDate } from "@/lib/domain/shared/zone";
+import { addDays, calendarDate, dateWords, daysBetween, startOfDate, toLocalTime } from "@/lib/domain/shared/zone";
+import type { Span } from "@/lib/domain/visits/slot";
 import { notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
 import { asksOf, visitsBetween } from "./internal";
 
 const MOST_IN_TRAY = 100;
+const ROW_MS = 30 * 60_000;
 
 /** One day of all crews, in the company's zone, and what waits to be booked. */
 export const getRunSheet = query({
@@ -40,9 +43,18 @@ export const getRunSheet = query({
       ...visit,
       asks: asks.filter((ask) => ask.visitId === visit.id).map(({ name, answer }) => ({ name, answer })),
     }));
-    return { date, today, zone, day, technicians, visits: onSheet, tray: await toBook(tx, today) };
+    return { date, today, rows: rowsOf(day, zone), technicians, visits: onSheet, tray: await toBook(tx, today) };
   },
 });
+
+/** The day in half hours: one of 23 or 25 hours has fewer or more of them. */
+function rowsOf({ startsAt, endsAt }: Span, zone: string) {
+  const count = (endsAt.getTime() - startsAt.getTime()) / ROW_MS;
+  return Array.from({ length: count }, (_, i) => {
+    const at = new Date(startsAt.getTime() + i * ROW_MS);
+    return { at, clock: toLocalTime(at, zone).slice(11) };
+  });
+}
 
 /** Jobs that no visit stands for, the ones whose due window ends first on top. */
 async function toBook(tx: Tx, today: string) {
@@ -65,7 +77,7 @@ async function toBook(tx: Tx, today: string) {
       crewSize: jobs.crewSize,
       site: { id: sites.id, name: sites.name, city: sites.city },
       waitsFor: sql<
-        string[]
+        WaitsFor[]
       >`array(select ${jobWaits.waitsFor} from ${jobWaits} where ${jobWaits.companyId} = ${jobs.companyId} and ${jobWaits.jobId} = ${jobs.id} and ${jobWaits.endedAt} is null order by 1)`,
     })
     .from(jobs)
@@ -76,6 +88,11 @@ async function toBook(tx: Tx, today: string) {
   const [all] = await tx.select({ total: count() }).from(jobs).where(where);
   return {
     total: all?.total ?? 0,
-    jobs: rows.map((job) => ({ ...job, daysLeft: job.latestOn ? daysBetween(today, job.latestOn) : null })),
+    jobs: rows.map(({ earliestOn, latestOn, ...job }) => ({
+      ...job,
+      opens: earliestOn && earliestOn > today ? dateWords(earliestOn) : null,
+      ends: latestOn && dateWords(latestOn),
+      daysLeft: latestOn ? daysBetween(today, latestOn) : null,
+    })),
   };
 }

@@ -1,8 +1,8 @@
 import type { Mail } from "@/lib/adapters/mail/send-mail";
 import type { MailTemplate } from "@/lib/domain/messages/events";
 import { FUNCTION_WORDS } from "@/lib/domain/systems/words";
+import { clockOf } from "@/lib/domain/visits/clock";
 import type { VisitLetter } from "@/lib/domain/visits/letter";
-import { clockOf } from "@/lib/domain/visits/times";
 
 /** Calendars are shared, so the address that answers stays in the letter. */
 const descriptionOf = ({ liveBlocks, crew, companyPhone }: VisitLetter): string =>
