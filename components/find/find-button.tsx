@@ -5,9 +5,7 @@ import { Dialog } from "radix-ui";
 import { useEffect, useState } from "react";
 import { Button } from "@/components/ui/button";
 import { FindPanel } from "./find-panel";
-
-const isTyping = (target: EventTarget | null) =>
-  target instanceof HTMLElement && (target.isContentEditable || /^(input|textarea|select)$/i.test(target.tagName));
+import { isTyping } from "./is-typing";
 
 /** One search from anywhere: `/` or Ctrl+K. */
 export function FindButton() {

@@ -17,6 +17,7 @@ import { createCustomer } from "./customers/create-customer";
 import { endContact } from "./customers/end-contact";
 import { getCustomer } from "./customers/get-customer";
 import { inviteContact } from "./customers/invite-contact";
+import { listCustomerChoices } from "./customers/list-customer-choices";
 import { listCustomers } from "./customers/list-customers";
 import { updateCustomer } from "./customers/update-customer";
 import { find } from "./find/find";
@@ -135,6 +136,7 @@ export const QUERIES: readonly Verb[] = [
   getCompany,
   getFrame,
   getCustomer,
+  listCustomerChoices,
   listCustomers,
   find,
   getSiteBrief,

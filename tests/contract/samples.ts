@@ -74,6 +74,7 @@ export const SAMPLES: Record<string, Sample> = {
     siteIds: [w.site.siteId],
   }),
   "contact.end": async (w) => ({ contactId: await freshContact(w) }),
+  "customer.choices": () => ({}),
   "customer.create": () => ({ name: unique("Customer"), note: "internal" }),
   "customer.get": (w) => ({ customerId: w.customer.customerId }),
   "customer.list": () => ({}),

@@ -8,6 +8,7 @@ import { siteHolders, sites } from "@/db/schema/sites";
 import { systems } from "@/db/schema/systems";
 import { dueState, dueWindow } from "@/lib/domain/agreements/due-window";
 import { reckoningWords } from "@/lib/domain/agreements/due-words";
+import { grouped } from "@/lib/domain/shared/grouped";
 import { rowId } from "@/lib/domain/shared/inputs";
 import { calendarDate } from "@/lib/domain/shared/zone";
 import { notFound } from "@/lib/errors";
@@ -48,6 +49,16 @@ async function itemsOf(tx: Tx, agreementId: string, now: Date) {
     .orderBy(asc(sites.name), asc(agreementItems.createdAt));
   const ids = rows.map((row) => row.item.id);
   if (ids.length === 0) return [];
+  const panels = await tx
+    .select({ id: systems.id, name: systems.name, siteId: systems.siteId })
+    .from(systems)
+    .where(
+      inArray(
+        systems.siteId,
+        rows.map((row) => row.site.id),
+      ),
+    );
+  const ofSite = grouped(panels, (system) => system.siteId);
   const done = await tx
     .select({ itemId: completions.itemId, targetOn: completions.targetOn, doneOn: completions.doneOn })
     .from(completions)
@@ -66,6 +77,7 @@ async function itemsOf(tx: Tx, agreementId: string, now: Date) {
     return {
       ...item,
       ...row,
+      systems: ofSite.get(row.site.id) ?? [],
       history,
       job: open.find((job) => job.itemId === item.id) ?? null,
       window,
@@ -78,10 +90,17 @@ async function itemsOf(tx: Tx, agreementId: string, now: Date) {
 
 /** Offered first where a site is chosen. */
 async function sitesHeldBy(tx: Tx, customerId: string) {
-  return tx
+  const held = await tx
     .selectDistinct({ id: sites.id, name: sites.name, street: sites.street, city: sites.city })
     .from(siteHolders)
     .innerJoin(sites, and(eq(sites.companyId, siteHolders.companyId), eq(sites.id, siteHolders.siteId)))
     .where(and(eq(siteHolders.customerId, customerId), isNull(siteHolders.toDate)))
     .orderBy(asc(sites.name));
+  const ids = held.map((site) => site.id);
+  const panels = ids.length > 0 ? await tx.select().from(systems).where(inArray(systems.siteId, ids)) : [];
+  const ofSite = grouped(panels, (system) => system.siteId);
+  return held.map((site) => ({
+    ...site,
+    systems: (ofSite.get(site.id) ?? []).map(({ id, name }) => ({ id, name })),
+  }));
 }

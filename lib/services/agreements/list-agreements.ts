@@ -6,17 +6,30 @@ import { customers } from "@/db/schema/customers";
 import { calendarDate } from "@/lib/domain/shared/zone";
 import { notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
-import { containing, offsetOf, PAGE_SIZE, PageInput } from "@/lib/services/paging";
+import { containing, offsetOf, orderBy, PageInput, sortInput } from "@/lib/services/paging";
 
 const ListAgreementsInput = PageInput.extend({
-  standing: z.enum(["now", "ended", "all"]).catch("now").default("now"),
+  standing: z.enum(["now", "ended"]).nullish().catch(null).default(null),
+  sort: sortInput(["number", "name", "customer", "tests", "sites", "first", "last"]),
 });
+
+const tests = sql<number>`count(${agreementItems.id})::int`;
+const sites = sql<number>`count(distinct ${agreementItems.siteId})::int`;
+const SORTS = {
+  number: agreements.number,
+  name: agreements.name,
+  customer: customers.name,
+  tests,
+  sites,
+  first: agreements.startsOn,
+  last: agreements.endsOn,
+};
 
 export const listAgreements = query({
   name: "agreement.list",
   needs: "agreement:read",
   input: ListAgreementsInput,
-  async run({ tx, now }, { page, q, standing }) {
+  async run({ tx, now }, { page, pageSize, q, standing, sort }) {
     const [company] = await tx.select({ zone: companies.zone }).from(companies);
     if (!company) throw notFound("company");
     const today = calendarDate(now, company.zone);
@@ -42,8 +55,8 @@ export const listAgreements = query({
         startsOn: agreements.startsOn,
         endsOn: agreements.endsOn,
         customer: { id: customers.id, name: customers.name },
-        items: sql<number>`count(${agreementItems.id})::int`,
-        sites: sql<number>`count(distinct ${agreementItems.siteId})::int`,
+        tests,
+        sites,
       })
       .from(agreements)
       .innerJoin(customers, withCustomer)
@@ -57,10 +70,10 @@ export const listAgreements = query({
       )
       .where(where)
       .groupBy(agreements.companyId, agreements.id, customers.companyId, customers.id)
-      .orderBy(desc(agreements.number))
-      .limit(PAGE_SIZE)
-      .offset(offsetOf(page));
+      .orderBy(...orderBy(sort, SORTS, [desc(agreements.number)]))
+      .limit(pageSize)
+      .offset(offsetOf(page, pageSize));
     const [all] = await tx.select({ total: count() }).from(agreements).innerJoin(customers, withCustomer).where(where);
-    return { rows, total: all?.total ?? 0, page, pageSize: PAGE_SIZE, today };
+    return { rows, total: all?.total ?? 0, page, pageSize, today };
   },
 });

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gte, inArray, isNull, lt } from "drizzle-orm";
+import { and, asc, desc, gte, inArray, isNull, lt } from "drizzle-orm";
 import type { Tx } from "@/db/client";
 import { agreementItems } from "@/db/schema/agreements";
 import { jobs, jobWaits } from "@/db/schema/jobs";

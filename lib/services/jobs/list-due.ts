@@ -2,10 +2,10 @@ import { eq } from "drizzle-orm";
 import { z } from "zod";
 import { agreementItems } from "@/db/schema/agreements";
 import { DUE_STATES } from "@/lib/domain/agreements/due-window";
-import { TEST_KINDS } from "@/lib/domain/agreements/words";
+import { TEST_KIND_WORDS, TEST_KINDS } from "@/lib/domain/agreements/words";
 import { rowId } from "@/lib/domain/shared/inputs";
 import { query } from "@/lib/services/command";
-import { offsetOf, PAGE_SIZE, PageInput } from "@/lib/services/paging";
+import { offsetOf, PageInput, sortInput } from "@/lib/services/paging";
 import { obstaclesOf } from "./due-facts";
 import { type DueItem, dueItems } from "./due-items";
 
@@ -14,9 +14,11 @@ const ListDueInput = PageInput.extend({
   when: z.enum(DUE_STATES).nullish().catch(null).default(null),
   state: z.string().max(2).catch("").default(""),
   city: z.string().trim().max(100).catch("").default(""),
+  /** The latest date lies within so many days, or has passed. */
+  days: z.coerce.number().int().min(1).max(3660).nullish().catch(null).default(null),
   job: z.enum(["made", "none"]).nullish().catch(null).default(null),
   site: rowId.nullish().catch(null).default(null),
-  sort: z.enum(["latest", "target", "earliest", "site"]).catch("latest").default("latest"),
+  sort: sortInput(["test", "site", "earliest", "target", "latest"]),
 });
 
 /** The due list: filtered and sorted as the address says, what stands in the way for the page's rows alone. */
@@ -24,7 +26,7 @@ export const listDue = query({
   name: "due.list",
   needs: "agreement:read",
   input: ListDueInput,
-  async run({ tx, now }, { page, q, kind, when, state, city, job, site, sort }) {
+  async run({ tx, now }, { page, pageSize, q, kind, when, state, city, days, job, site, sort }) {
     const all = await dueItems(tx, now, site ? eq(agreementItems.siteId, site) : undefined);
     const words = q.toLowerCase();
     const there = all.filter(
@@ -32,11 +34,12 @@ export const listDue = query({
         (kind === null || row.item.testKind === kind) &&
         (state === "" || row.site.state === state) &&
         (city === "" || row.site.city === city) &&
+        (days === null || row.daysLeft <= days) &&
         (job === null || (row.job !== null) === (job === "made")) &&
         [row.site.name, row.site.city, row.customer.name].some((text) => text.toLowerCase().includes(words)),
     );
-    const found = there.filter((row) => when === null || row.state === when).sort(ORDER[sort]);
-    const rows = found.slice(offsetOf(page), offsetOf(page) + PAGE_SIZE);
+    const found = there.filter((row) => when === null || row.state === when).sort(ordered(sort));
+    const rows = found.slice(offsetOf(page, pageSize), offsetOf(page, pageSize) + pageSize);
     const obstacles = await obstaclesOf(tx, rows, now);
     return {
       rows: rows.map(({ reckoning, ...row }) => ({
@@ -50,29 +53,29 @@ export const listDue = query({
       /** What can be chosen from. */
       states: [...new Set(all.map((row) => row.site.state))].sort(),
       cities: [...new Set(all.map((row) => row.site.city))].sort(),
-      anything: all.length > 0,
       total: found.length,
       page,
-      pageSize: PAGE_SIZE,
+      pageSize,
     };
   },
 });
 
-const by =
-  (...keys: ((row: DueItem) => string)[]) =>
-  (a: DueItem, b: DueItem): number => {
-    for (const key of keys) {
-      const [left, right] = [key(a), key(b)];
-      if (left !== right) return left < right ? -1 : 1;
-    }
-    return 0;
-  };
-
-const id = (row: DueItem) => row.item.id;
-const latest = (row: DueItem) => row.window.latest;
-const ORDER = {
-  latest: by(latest, id),
-  target: by((row) => row.window.target, latest, id),
-  earliest: by((row) => row.window.earliest, latest, id),
-  site: by((row) => row.site.name, latest, id),
+const KEYS: Record<"test" | "site" | "earliest" | "target" | "latest", (row: DueItem) => string> = {
+  test: (row) => TEST_KIND_WORDS[row.item.testKind],
+  site: (row) => row.site.name,
+  earliest: (row) => row.window.earliest,
+  target: (row) => row.window.target,
+  latest: (row) => row.window.latest,
 };
+
+/** The chosen order first, then the latest date, so that pages never overlap. */
+function ordered(sort: z.output<typeof ListDueInput>["sort"]) {
+  const down = sort?.startsWith("-");
+  const chosen = KEYS[(sort?.replace("-", "") ?? "latest") as keyof typeof KEYS];
+  return (a: DueItem, b: DueItem): number => {
+    const first = compare(chosen(a), chosen(b));
+    return (down ? -first : first) || compare(KEYS.latest(a), KEYS.latest(b)) || compare(a.item.id, b.item.id);
+  };
+}
+
+const compare = (a: string, b: string): number => (a === b ? 0 : a < b ? -1 : 1);

@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, gt, ilike, isNull, or, type SQL, sql } from "drizzle-orm";
+import { and, asc, count, desc, eq, gt, ilike, isNull, or, sql } from "drizzle-orm";
 import { z } from "zod";
 import { jobs } from "@/db/schema/jobs";
 import { sites } from "@/db/schema/sites";
@@ -7,21 +7,21 @@ import { JOB_STATES } from "@/lib/domain/jobs/job-state";
 import { JOB_KINDS } from "@/lib/domain/jobs/words";
 import { rowId } from "@/lib/domain/shared/inputs";
 import { query } from "@/lib/services/command";
-import { containing, offsetOf, PAGE_SIZE, PageInput } from "@/lib/services/paging";
+import { containing, offsetOf, orderBy, PageInput, sortInput } from "@/lib/services/paging";
 import { stateExpression } from "./internal";
 
 const ListJobsInput = PageInput.extend({
   kind: z.enum(JOB_KINDS).nullish().catch(null).default(null),
   state: z.enum(JOB_STATES).nullish().catch(null).default(null),
   site: rowId.nullish().catch(null).default(null),
-  sort: z.enum(["newest", "oldest", "due", "visit"]).catch("newest").default("newest"),
+  sort: sortInput(["number", "state", "title", "kind", "site", "due", "visit"]),
 });
 
 export const listJobs = query({
   name: "job.list",
   needs: "job:read",
   input: ListJobsInput,
-  async run({ tx, now }, { page, q, kind, state, site, sort }) {
+  async run({ tx, now }, { page, pageSize, q, kind, state, site, sort }) {
     const words = containing(q);
     const number = /^\d{1,9}$/.test(q) ? Number(q) : null;
     const stateNow = stateExpression(now);
@@ -54,12 +54,6 @@ export const listJobs = query({
       )
       .orderBy(asc(visits.startsAt))
       .limit(1)})`;
-    const order: Record<typeof sort, SQL[]> = {
-      newest: [desc(jobs.number)],
-      oldest: [asc(jobs.number)],
-      due: [sql`${jobs.latestOn} asc nulls last`, asc(jobs.number)],
-      visit: [sql`${nextVisit} asc nulls last`, asc(jobs.number)],
-    };
     const rows = await tx
       .select({
         id: jobs.id,
@@ -76,10 +70,24 @@ export const listJobs = query({
       .from(jobs)
       .innerJoin(sites, onSite)
       .where(where)
-      .orderBy(...order[sort])
-      .limit(PAGE_SIZE)
-      .offset(offsetOf(page));
+      .orderBy(
+        ...orderBy(
+          sort,
+          {
+            number: jobs.number,
+            state: stateNow,
+            title: jobs.title,
+            kind: jobs.kind,
+            site: sites.name,
+            due: jobs.latestOn,
+            visit: nextVisit,
+          },
+          [desc(jobs.number)],
+        ),
+      )
+      .limit(pageSize)
+      .offset(offsetOf(page, pageSize));
     const [all] = await tx.select({ total: count() }).from(jobs).innerJoin(sites, onSite).where(where);
-    return { rows, total: all?.total ?? 0, page, pageSize: PAGE_SIZE };
+    return { rows, total: all?.total ?? 0, page, pageSize };
   },
 });
