@@ -7,7 +7,10 @@ import type { Context } from "@/lib/services/command";
 import { updateCompany } from "@/lib/services/company/update-company";
 import { foundCompany } from "@/lib/services/people/found-company";
 import { demoAccounts } from "./accounts";
+import { agreeWithCustomers } from "./agreements";
+import { takeCalls } from "./calls";
 import { addCustomers, hireOffice, hireTechnicians } from "./company";
+import { planLiveTests } from "./live-visits";
 import { DEMO_COMPANY, DEMO_PASSWORD } from "./people";
 import { acceptLetter, signedIn } from "./sign-up";
 import { planWork } from "./work";
@@ -29,11 +32,14 @@ async function load(now: Date): Promise<void> {
   await hireOffice(owner);
   const technicians = await hireTechnicians(owner);
   const siteIds = await addCustomers(owner);
-  const visits = await planWork(await asMember("dispatcher", now), technicians, siteIds);
+  const dispatcher = await asMember("dispatcher", now);
+  const visits = await planWork(dispatcher, technicians, siteIds);
+  const tests = await agreeWithCustomers(dispatcher);
+  await takeCalls(dispatcher, siteIds);
   const { companyId: _, ownerName, ownerEmail, ...company } = DEMO_COMPANY;
   await updateCompany(owner, company);
   console.log(
-    `Demo company ${company.name}: ${technicians.length} technicians, ${siteIds.length} sites, ${visits} visits`,
+    `Demo company ${company.name}: ${technicians.length} technicians, ${siteIds.length} sites, ${visits} visits, ${tests} agreed tests`,
   );
 }
 
