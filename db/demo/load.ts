@@ -36,6 +36,7 @@ async function load(now: Date): Promise<void> {
   const visits = await planWork(dispatcher, technicians, siteIds);
   const tests = await agreeWithCustomers(dispatcher);
   await takeCalls(dispatcher, siteIds);
+  await planLiveTests(dispatcher, siteIds);
   const { companyId: _, ownerName, ownerEmail, ...company } = DEMO_COMPANY;
   await updateCompany(owner, company);
   console.log(

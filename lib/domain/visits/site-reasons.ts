@@ -1,5 +1,5 @@
 import { FUNCTION_WORDS, type SystemFunction } from "@/lib/domain/systems/words";
-import { type NoTestDate, type TestWindow, windowSpans } from "@/lib/domain/windows/spans";
+import { type NoTestDate, noTestOn, type TestWindow, windowSpans } from "@/lib/domain/windows/spans";
 import { addDays, type CalendarDate, calendarDate, dateWords, type Zone } from "../shared/zone";
 import { type LiveBlock, type SlotReason, type Span, spanFrom, type WantedVisit, within } from "./slot";
 
@@ -81,7 +81,7 @@ function windowReasons(one: SystemFunction, live: Span, { windows, now }: SiteFa
 
 function noTestReasons(one: SystemFunction, live: Span, zone: Zone, noTestDates: readonly NoTestDate[]): SlotReason[] {
   const [first, last] = datesOf(live, zone);
-  const hit = noTestDates.find((days) => days.functions.includes(one) && days.fromDate <= last && first <= days.toDate);
+  const hit = [first, last].flatMap((date) => noTestOn(noTestDates, [one], date)).at(0);
   if (!hit) return [];
   return [{ code: "no_test_date", words: `${FUNCTION_WORDS[one]}: no tests then, ${hit.reason}`, overridable: true }];
 }

@@ -36,6 +36,7 @@ export async function jobToBook(tx: Tx, jobId: string) {
   const [job] = await tx.select().from(jobs).where(eq(jobs.id, jobId));
   if (!job) throw notFound("job");
   if (job.canceledAt) throw new AppError("blocked", "The job is canceled");
+  if (job.doneOn) throw new AppError("blocked", "The job is done");
   return job;
 }
 
