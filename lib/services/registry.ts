@@ -56,12 +56,39 @@ import { restoreMembership } from "./people/restore-membership";
 import { setHome } from "./people/set-home";
 import { signOutEverywhere } from "./people/sign-out-everywhere";
 import { getPlaces } from "./planning/get-places";
+import { getMatrix } from "./sequences/get-matrix";
+import { getScript } from "./sequences/get-script";
+import { listVersions } from "./sequences/list-versions";
+import { saveMatrix } from "./sequences/save-matrix";
+import { addDocument } from "./sites/add-document";
 import { addHolder } from "./sites/add-holder";
+import { addKey } from "./sites/add-key";
+import { addSecret } from "./sites/add-secret";
+import { addStationAccount } from "./sites/add-station-account";
 import { createSite } from "./sites/create-site";
+import { endDocument } from "./sites/end-document";
 import { endHolder } from "./sites/end-holder";
+import { endKey } from "./sites/end-key";
+import { endSecret } from "./sites/end-secret";
+import { endStationAccount } from "./sites/end-station-account";
 import { getSite } from "./sites/get-site";
+import { getSiteFacts } from "./sites/get-site-facts";
+import { handOverKey } from "./sites/hand-over-key";
 import { listSites } from "./sites/list-sites";
+import { lookAtSecret } from "./sites/look-at-secret";
 import { updateSite } from "./sites/update-site";
+import { addSystem } from "./systems/add-system";
+import { changeSystem } from "./systems/change-system";
+import { getOutputs } from "./systems/get-outputs";
+import { getSystem } from "./systems/get-system";
+import { listPoints } from "./systems/list-points";
+import { putBackEntry } from "./systems/put-back-entry";
+import { removeEntry } from "./systems/remove-entry";
+import { saveEquipment } from "./systems/save-equipment";
+import { saveGroup } from "./systems/save-group";
+import { saveOutput } from "./systems/save-output";
+import { savePoint } from "./systems/save-point";
+import { saveZone } from "./systems/save-zone";
 import { answerVisit } from "./visits/answer";
 import { askForVisit } from "./visits/ask";
 import { cancelVisit } from "./visits/cancel-visit";
@@ -76,6 +103,12 @@ import { moveVisit } from "./visits/move-visit";
 import { planVisit } from "./visits/plan-visit";
 import { recordAnswer } from "./visits/record-answer";
 import { swapVisits } from "./visits/swap-visits";
+import { addAttendance } from "./windows/add-attendance";
+import { addNoTest } from "./windows/add-no-test";
+import { addWindow } from "./windows/add-window";
+import { endAttendance } from "./windows/end-attendance";
+import { endNoTest } from "./windows/end-no-test";
+import { endWindow } from "./windows/end-window";
 
 /** Everything that can be done or read. Doors (actions, routes, worker, sync) take verbs from nowhere else. */
 export const COMMANDS: readonly Verb[] = [
@@ -129,6 +162,32 @@ export const COMMANDS: readonly Verb[] = [
   planVisit,
   recordAnswer,
   swapVisits,
+  saveMatrix,
+  addDocument,
+  addKey,
+  addSecret,
+  addStationAccount,
+  endDocument,
+  endKey,
+  endSecret,
+  endStationAccount,
+  handOverKey,
+  lookAtSecret,
+  addSystem,
+  changeSystem,
+  putBackEntry,
+  removeEntry,
+  saveEquipment,
+  saveGroup,
+  saveOutput,
+  savePoint,
+  saveZone,
+  addAttendance,
+  addNoTest,
+  addWindow,
+  endAttendance,
+  endNoTest,
+  endWindow,
 ];
 
 export const QUERIES: readonly Verb[] = [
@@ -159,4 +218,11 @@ export const QUERIES: readonly Verb[] = [
   getPlaces,
   getReasons,
   getVisit,
+  getSiteFacts,
+  getMatrix,
+  getScript,
+  listVersions,
+  getOutputs,
+  getSystem,
+  listPoints,
 ];

@@ -20,7 +20,7 @@ export function inputOf(form: FormData): Record<string, string | string[]> {
   return input;
 }
 
-const SECRET_FIELDS = /password/i;
+const SECRET_FIELDS = /password|secret/i;
 
 /** What was typed comes back to the form, but for secrets. */
 const typedValues = (input: Record<string, string | string[]>): Record<string, string> =>

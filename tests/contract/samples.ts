@@ -3,9 +3,17 @@ import type { Actor } from "@/lib/auth/actor";
 import { addContact } from "@/lib/services/customers/add-contact";
 import { endMembership } from "@/lib/services/people/end-membership";
 import { inviteStaff } from "@/lib/services/people/invite-staff";
+import { addDocument } from "@/lib/services/sites/add-document";
+import { addKey } from "@/lib/services/sites/add-key";
+import { addStationAccount } from "@/lib/services/sites/add-station-account";
 import { askForVisit } from "@/lib/services/visits/ask";
+import { addAttendance } from "@/lib/services/windows/add-attendance";
+import { addNoTest } from "@/lib/services/windows/add-no-test";
+import { addWindow } from "@/lib/services/windows/add-window";
 import { givePassword, secondSession, unique, uniqueAddress } from "../factories/company";
 import { deadLetter } from "../factories/messages";
+import { bareSystem, newSecret, smallSystem, systemWithMatrix } from "../factories/systems";
+import { siteOfToday } from "../factories/today";
 import { itemFacts, newItem, newJob, newWait } from "../factories/work";
 import { newCustomer, newSite, newVisit, UNLICENSED, type World } from "../factories/world";
 
@@ -122,17 +130,45 @@ export const SAMPLES: Record<string, Sample> = {
   },
   "person.set-home": (w) => ({ memberId: w.technician.memberId, ...address }),
   "portal.home": () => ({}),
+  "matrix.get": async (w) => ({ systemId: (await systemWithMatrix(w)).systemId, version: "1" }),
+  "matrix.save": async (w) => {
+    const { systemId, cell } = await systemWithMatrix(w);
+    return { systemId, basedOn: 1, note: "As found", removed: [cell], added: [{ ...cell, source: "as_found" }] };
+  },
+  "matrix.versions": async (w) => ({ systemId: (await systemWithMatrix(w)).systemId }),
+  "secret.add": (w) => ({ siteId: w.site.siteId, kind: "door_code", label: unique("Door"), secret: "1234" }),
+  "secret.end": async (w) => ({ secretId: await newSecret(w) }),
+  "secret.look": async (w) => ({ secretId: await newSecret(w, await siteOfToday(w)) }),
+  "site.add-document": (w) => ({ siteId: w.site.siteId, kind: "drawing", title: "As built", keptWhere: "Panel room" }),
   "site.add-holder": async (w) => ({
     siteId: w.site.siteId,
     customerId: (await newCustomer(w.company)).customerId,
     capacity: "occupant",
     fromDate: "2026-01-01",
   }),
+  "site.add-key": (w) => ({ siteId: w.site.siteId, kind: "key", label: "Panel", keptBy: "Office, hook 7" }),
+  "site.add-station-account": (w) => stationAccount(w),
   "site.create": () => ({ ...address, name: unique("Site"), kind: "office", zone: "America/Chicago" }),
+  "site.end-document": async (w) => ({
+    documentId: (
+      await addDocument(w.owner.context, {
+        siteId: w.site.siteId,
+        kind: "program",
+        title: unique("Program"),
+        keptWhere: "File 7",
+      })
+    ).documentId,
+  }),
   "site.end-holder": async (w) => ({
     holderId: (await newSite(w.company, w.customer.customerId)).holderId,
     toDate: "2026-12-31",
   }),
+  "site.end-key": async (w) => ({ keyId: await newKey(w) }),
+  "site.end-station-account": async (w) => ({
+    stationAccountId: (await addStationAccount(w.owner.context, stationAccount(w))).stationAccountId,
+  }),
+  "site.facts": (w) => ({ siteId: w.site.siteId }),
+  "site.hand-over-key": async (w) => ({ keyId: await newKey(w), keptBy: "Van 3" }),
   "site.get": (w) => ({ siteId: w.site.siteId }),
   "site.list": () => ({}),
   "site.update": (w) => ({
@@ -142,6 +178,39 @@ export const SAMPLES: Record<string, Sample> = {
     kind: "school",
     zone: "America/Chicago",
   }),
+  "system.add": (w) => ({ siteId: w.site.siteId, key: unique("S"), name: "Main panel" }),
+  "system.change": async (w) => ({ systemId: await bareSystem(w), key: unique("S"), name: "Main panel, tower" }),
+  "system.get": async (w) => ({ systemId: await bareSystem(w) }),
+  "system.list-points": async (w) => ({ systemId: (await smallSystem(w)).systemId, proof: "never", sort: "proven" }),
+  "system.outputs": async (w) => ({ systemId: (await smallSystem(w)).systemId }),
+  "system.put-back": async (w) => {
+    const { systemId, pointId } = await smallSystem(w);
+    return { systemId, entry: "point", id: pointId };
+  },
+  "system.remove": async (w) => {
+    const { systemId, equipmentId } = await smallSystem(w);
+    return { systemId, entry: "equipment", id: equipmentId, removedOn: "2026-12-01" };
+  },
+  "system.save-equipment": async (w) => {
+    const { systemId, outputId, equipmentId } = await smallSystem(w);
+    return { systemId, id: equipmentId, outputId, tag: "AHU-7", kind: "fan", action: "start", longestOffMinutes: "15" };
+  },
+  "system.save-group": async (w) => ({
+    systemId: await bareSystem(w),
+    key: "D",
+    name: "Doors",
+    function: "door_release",
+  }),
+  "system.save-output": async (w) => {
+    const { systemId, groupId } = await smallSystem(w);
+    return { systemId, groupId, address: "R2", kind: "relay", label: "AHU 2" };
+  },
+  "system.save-point": async (w) => {
+    const { systemId, zoneId } = await smallSystem(w);
+    return { systemId, zoneId, address: "1-002", kind: "heat", label: "Kitchen", walkOrder: "2" };
+  },
+  "system.save-zone": async (w) => ({ systemId: await bareSystem(w), key: "7", name: "Attic" }),
+  "system.script": async (w) => ({ systemId: (await systemWithMatrix(w)).systemId }),
   "visit.cancel": async (w) => {
     const date = nextDay();
     const { visitId } = await newVisit(w.company, w.site.siteId, [w.technician], `${date}T08:00`, `${date}T09:00`);
@@ -186,7 +255,31 @@ export const SAMPLES: Record<string, Sample> = {
     exchange: "times",
     overrides: UNLICENSED,
   }),
+  "window.add": (w) => window(w),
+  "window.add-attendance": (w) => attendance(w),
+  "window.add-no-test": (w) => noTest(w),
+  "window.end": async (w) => ({ windowId: (await addWindow(w.owner.context, window(w))).windowId }),
+  "window.end-attendance": async (w) => ({
+    attendanceId: (await addAttendance(w.owner.context, attendance(w))).attendanceId,
+  }),
+  "window.end-no-test": async (w) => ({ noTestId: (await addNoTest(w.owner.context, noTest(w))).noTestId }),
 };
+
+const stationAccount = (w: World) => ({
+  siteId: w.site.siteId,
+  station: "Lakeside Central",
+  phone: "312-555-0170",
+  accountNumber: unique("A"),
+});
+
+const newKey = async (w: World) =>
+  (await addKey(w.owner.context, { siteId: w.site.siteId, kind: "badge", label: unique("Badge"), keptBy: "Desk" }))
+    .keyId;
+
+const fans = (w: World) => ({ siteId: w.site.siteId, functions: ["fan_shutdown"] });
+const window = (w: World) => ({ ...fans(w), weekdays: ["1"], startsLocal: "22:00", endsLocal: "06:00" });
+const noTest = (w: World) => ({ ...fans(w), fromDate: "2026-12-14", toDate: "2026-12-18", reason: "Exams" });
+const attendance = (w: World) => ({ ...fans(w), party: "Building engineer", contactId: w.contact.contactId });
 
 const freshMember = async (w: World) =>
   (await inviteStaff(w.owner.context, { name: unique("Person"), email: uniqueAddress(), role: "technician" })).memberId;
