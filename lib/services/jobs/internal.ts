@@ -2,7 +2,7 @@ import { and, desc, eq, isNull, type SQL, sql } from "drizzle-orm";
 import type { Tx } from "@/db/client";
 import { jobs, jobTerms, jobWaits } from "@/db/schema/jobs";
 import { visits } from "@/db/schema/visits";
-import { type JobFacts, type JobState, jobState, mayBecome } from "@/lib/domain/jobs/job-state";
+import { JOB_STATE_WORDS, type JobFacts, type JobState, jobState, mayBecome } from "@/lib/domain/jobs/job-state";
 import { AppError, notFound } from "@/lib/errors";
 
 export async function jobToChange(tx: Tx, jobId: string) {
@@ -57,24 +57,23 @@ export function factsOf(job: JobRow, times: readonly Times[], waiting: boolean, 
 export const waitsOf = (tx: Tx, jobId: string) =>
   tx.select().from(jobWaits).where(eq(jobWaits.jobId, jobId)).orderBy(desc(jobWaits.since));
 
-const NOT_NOW: Partial<Record<JobState, string>> = {
-  canceled: "Cancel its visits first: a crew is booked, under way, or has been there",
-  waiting: "The job is finished: nothing can be waited for",
-  to_review: "The job is finished already",
-};
-
 /** Refuses what the table of transitions does not allow from the state a job is in. */
 export async function mustMayBecome(tx: Tx, job: typeof jobs.$inferSelect, to: JobState, now: Date): Promise<void> {
+  // Work that only seems to be over is "to review" as well; once somebody has said so, nothing here changes it.
+  if (job.doneOn !== null) throw new AppError("blocked", "The job is done already");
   const times = await tx
     .select({ startsAt: visits.startsAt, endsAt: visits.endsAt, canceledAt: visits.canceledAt })
     .from(visits)
     .where(eq(visits.jobId, job.id));
-  const waits = await waitsOf(tx, job.id);
-  const waiting = waits.some((wait) => wait.endedAt === null);
+  const waiting = (await waitsOf(tx, job.id)).some((wait) => wait.endedAt === null);
   const from = jobState(factsOf(job, times, waiting, now));
-  // A second wait, and saying again that work is over that only seems so, change no state.
-  const same = from === to && job.doneOn === null;
-  if (!same && !mayBecome(from, to)) throw new AppError("blocked", NOT_NOW[to] ?? "Not in the state the job is in");
+  if (from === to || mayBecome(from, to)) return;
+  throw new AppError(
+    "blocked",
+    to === "canceled"
+      ? "Cancel its visits first, so that crew and building hear of it"
+      : `The job is ${JOB_STATE_WORDS[from].toLowerCase()}: that cannot follow now`,
+  );
 }
 
 export async function termsOf(tx: Tx, jobId: string) {
