@@ -55,7 +55,7 @@ export function AgreementForm({ action, today, customers, customerId, agreement 
         optional
         defaultValue={agreement?.purchaseOrder}
       />
-      <SubmitButton>{agreement ? "Save" : "Add agreement"}</SubmitButton>
+      <SubmitButton className="justify-self-start">{agreement ? "Save" : "Add agreement"}</SubmitButton>
     </Form>
   );
 }

@@ -176,7 +176,7 @@ export function ItemForm({ action, agreementId, sites, item }: Props) {
           defaultValue={item ? dollarsOf(item.priceCents) : undefined}
         />
       </div>
-      <SubmitButton>{item ? "Save" : "Add to the agreement"}</SubmitButton>
+      <SubmitButton className="justify-self-start">{item ? "Save" : "Add to the agreement"}</SubmitButton>
     </Form>
   );
 }

@@ -66,7 +66,7 @@ export function CallForm({ action, site: given }: { action: FormAction; site: Si
           )}
         </div>
         <div className="flex flex-wrap gap-2">
-          <SubmitButton>Make the job</SubmitButton>
+          <SubmitButton className="justify-self-start">Make the job</SubmitButton>
         </div>
       </Form>
       <SiteAtHand site={site}>

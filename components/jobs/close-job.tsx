@@ -24,7 +24,9 @@ export function CloseJob({ jobId, state, today, isOccurrence, done, cancel }: Pr
           defaultValue={today}
           hint={isOccurrence ? "The next window counts from this day" : undefined}
         />
-        <SubmitButton variant="quiet">Say that it is done</SubmitButton>
+        <SubmitButton variant="quiet" className="justify-self-start">
+          Say that it is done
+        </SubmitButton>
       </Form>
       {mayBecome(state, "canceled") ? (
         <Form action={cancel} className="grid content-start gap-3">
@@ -34,7 +36,9 @@ export function CloseJob({ jobId, state, today, isOccurrence, done, cancel }: Pr
             name="reason"
             hint={isOccurrence ? "The due list will show the occurrence again" : undefined}
           />
-          <SubmitButton variant="danger">Cancel the job</SubmitButton>
+          <SubmitButton variant="danger" className="justify-self-start">
+            Cancel the job
+          </SubmitButton>
         </Form>
       ) : (
         <p className="text-muted">

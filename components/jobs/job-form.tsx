@@ -62,7 +62,7 @@ export function JobForm({ action, job }: { action: FormAction; job: Job }) {
         onChange={setFunctions}
       />
       <CheckboxField label="Urgent" name="urgent" as="switch" defaultChecked={job.urgent} />
-      <SubmitButton>Save</SubmitButton>
+      <SubmitButton className="justify-self-start">Save</SubmitButton>
     </Form>
   );
 }

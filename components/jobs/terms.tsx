@@ -37,7 +37,9 @@ export function JobTerms({ jobId, terms, demanded, action }: Props) {
             name="noneNeeded"
             defaultChecked={terms?.noneNeeded ?? false}
           />
-          <SubmitButton variant="quiet">Save</SubmitButton>
+          <SubmitButton variant="quiet" className="self-center justify-self-start">
+            Save
+          </SubmitButton>
         </Form>
       )}
     </div>

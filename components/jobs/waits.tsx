@@ -67,7 +67,9 @@ export function JobWaits({ jobId, waits, zone, today, actions }: Props) {
             <TextField label="From whom" name="person" hint="Who delivers, opens or approves" />
             <TextField label="Until" name="untilDate" type="date" optional />
             <TextField label="Note" name="note" optional />
-            <SubmitButton variant="quiet">Wait</SubmitButton>
+            <SubmitButton variant="quiet" className="justify-self-start">
+              Wait
+            </SubmitButton>
           </Form>
         </details>
       )}

@@ -128,7 +128,9 @@ export default async function DueListPage({ searchParams }: PageProps<"/due-list
                 </TextLink>
               ) : (
                 mayMakeJobs && (
-                  <RowAction action={makeDueAction} name="itemId" value={row.item.id} button="Make the job" />
+                  <span className="whitespace-nowrap">
+                    <RowAction action={makeDueAction} name="itemId" value={row.item.id} button="Make the job" />
+                  </span>
                 )
               ),
           },

@@ -46,7 +46,7 @@ export type IntervalRule = {
 const NFPA_72: IntervalRule = {
   key: "nfpa_72",
   title: "NFPA 72, definitions of chapter 3",
-  edition: "2010 (3.3.106; renumbered since)",
+  edition: "2010, 3.3.106; renumbered since",
   jurisdiction: "Where NFPA 72 is adopted; fire alarm systems only",
   source: "https://keyeslifesafety.com/category/fire-detection-systems/testing-fire-detection-systems/",
   tolerances: {
