@@ -19,7 +19,7 @@ export function BookVisit({ jobId, date: first }: { jobId: string; date: string 
     bands.filter((band) => band.reasons.length === 0).map((band) => ({ lead: memberId, at: timeOf(band.from) })),
   );
   const best = offers?.sort((a, b) => a.at - b.at).find(({ at }) => at >= dawn(places?.starts[0]?.at));
-  const start = places?.starts.find((one) => timeOf(one.at) === best?.at) ?? places?.starts.at(28);
+  const start = places?.starts.find((one) => timeOf(one.at) === best?.at) ?? places?.starts.at(0);
   return (
     <div className="grid max-w-2xl gap-4">
       <div className="w-48">

@@ -51,12 +51,8 @@ export function DayGrid({ sheet, places, lifted, onPlace, onOpen, onPutBack }: P
   const inHand = places !== undefined;
   const firstFree = useRef<() => void>(() => {});
   firstFree.current = () => {
-    const column = people.findIndex(({ id }) => columnOf(places, id)?.bands.some((band) => band.reasons.length === 0));
-    const own = columnOf(places, people[Math.max(0, column)]?.id);
-    const band = own?.bands.find((one) => one.reasons.length === 0);
-    const at = band ? timeOf(band.from) : Number.NaN;
-    const row = sheet.rows.findIndex((one) => timeOf(one.at) >= at);
-    const to = { row: row < 0 ? rowOf(sheet, FIRST_CLOCK) : row, column: Math.max(0, column) };
+    const opening = rowOf(sheet, FIRST_CLOCK);
+    const to = firstFreePlace(sheet, people, places, opening) ?? { row: opening, column: 0 };
     setCursor(to);
     requestAnimationFrame(() => cell(to)?.focus());
   };
@@ -199,6 +195,18 @@ const rowOf = (sheet: Sheet, clock: string): number =>
     0,
     sheet.rows.findIndex((row) => row.clock === clock),
   );
+
+/** The first person who can go, at the first time from the row on; else at any time. */
+function firstFreePlace(sheet: Sheet, people: Sheet["technicians"], places: Places | undefined, from: number) {
+  for (const least of [from, 0]) {
+    for (const [column, { id }] of people.entries()) {
+      const own = columnOf(places, id);
+      const row = sheet.rows.findIndex(({ at }, i) => i >= least && placeAt(own, timeOf(at), ROW_MS)?.state === "free");
+      if (row >= 0) return { row, column };
+    }
+  }
+  return undefined;
+}
 
 const columnOf = (places: Places | undefined, memberId: string | undefined) =>
   places?.columns.find((column) => column.memberId === memberId);

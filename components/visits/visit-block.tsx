@@ -35,7 +35,7 @@ export function VisitBlock({ visit, rowAt, faded, lifted, onOpen }: Props) {
       }}
       style={{ top: `${top}rem`, height: `${height}rem` }}
       className={cn(
-        "absolute inset-x-1 z-[4] cursor-pointer overflow-hidden rounded-md border border-line border-l-4 border-l-settled bg-surface px-2 py-0.5 text-left text-sm leading-tight shadow-sm hover:border-text",
+        "absolute inset-x-1 z-[4] flex cursor-pointer flex-col items-start overflow-hidden rounded-md border border-line border-l-4 border-l-settled bg-surface px-2 py-0.5 text-left text-sm leading-tight shadow-sm hover:border-text",
         answer?.includes("declined") && "border-l-alert",
         faded && "pointer-events-none opacity-60",
         lifted && "border-dashed",

@@ -42,6 +42,7 @@ const CODES: Record<string, (refusal: Refusal) => AppError> = {
   "23P01": (r) => new AppError("conflict", words(r, "That overlaps with something that is already there")),
   "23503": () => new AppError("not_found", "Something that this refers to does not exist"),
   "23514": () => new AppError("invalid", "The database refused a value that is out of range"),
+  "40P01": () => new AppError("conflict", "Somebody else changed the same at that moment; try again"),
   "42501": () => new AppError("forbidden", "You may not do that"),
 };
 

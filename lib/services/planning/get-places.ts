@@ -20,7 +20,7 @@ import { wantedVisit } from "@/lib/services/visits/wanted";
 const DAY_MS = 86_400_000;
 
 /**
- * Every start at which a visit could be put on a day (or a few), for every technician as its lead, gathered into bands
+ * Every start still ahead at which a visit could be put on a day (or a few), for every technician as its lead, gathered into bands
  * that say what it costs there or why not. What the site says is reckoned once for each start, not for each person.
  */
 export const getPlaces = query({
@@ -49,16 +49,18 @@ export const getPlaces = query({
     const facts = await slotFacts(tx, { site, memberIds: ids, span: around, except, now });
     const errands: Errand[] = await busyBetween(tx, ids, around, except);
     const windows = windowsBetween(facts.windows, around, site.zone);
-    const starts = startsOf(span, stepMinutes, site.zone).map((start) => {
-      const liveBlocks = proposedLiveBlocks({ minutes, functions, liveMinutes }, start.at, windows);
-      const place = spanFrom(start.at, minutes);
-      return {
-        ...start,
-        liveBlocks,
-        span: place,
-        reasons: siteReasons({ minutes, liveBlocks, due }, place, site.zone, { ...facts, windows }),
-      };
-    });
+    const starts = startsOf(span, stepMinutes, site.zone)
+      .filter(({ at }) => at >= now)
+      .map((start) => {
+        const liveBlocks = proposedLiveBlocks({ minutes, functions, liveMinutes }, start.at, windows);
+        const place = spanFrom(start.at, minutes);
+        return {
+          ...start,
+          liveBlocks,
+          span: place,
+          reasons: siteReasons({ minutes, liveBlocks, due }, place, site.zone, { ...facts, windows }),
+        };
+      });
     const columns = people.map((lead) => {
       const crew = [lead.id, ...helpers.filter((id) => id !== lead.id)].map((memberId, i) => ({
         memberId,
