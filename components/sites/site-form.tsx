@@ -14,7 +14,11 @@ type Site = {
   state: string;
   postalCode: string;
   zone: string;
+  latitude: number | null;
+  longitude: number | null;
   accessNote: string | null;
+  authorityName: string | null;
+  authorityPhone: string | null;
 };
 
 type Props = { action: FormAction; zones: readonly string[]; zone: string; site?: Site };
@@ -43,6 +47,24 @@ export function SiteForm({ action, zones, zone, site }: Props) {
         </SelectField>
         <TextField label="Postal code" name="postalCode" defaultValue={site?.postalCode} inputMode="numeric" />
       </div>
+      <div className="grid gap-4 sm:grid-cols-2">
+        <TextField
+          label="Latitude"
+          name="latitude"
+          optional
+          inputMode="decimal"
+          defaultValue={site?.latitude?.toString()}
+          hint="Travel is reckoned from here"
+        />
+        <TextField
+          label="Longitude"
+          name="longitude"
+          optional
+          inputMode="decimal"
+          defaultValue={site?.longitude?.toString()}
+          hint="West of Greenwich is negative"
+        />
+      </div>
       <SelectField label="Time zone" name="zone" defaultValue={site?.zone ?? zone}>
         {zones.map((name) => (
           <option key={name}>{name}</option>
@@ -54,6 +76,21 @@ export function SiteForm({ action, zones, zone, site }: Props) {
         defaultValue={site?.accessNote}
         hint="For the crew only. No codes or passwords here."
       />
+      <div className="grid gap-4 sm:grid-cols-[1fr_12rem]">
+        <TextField
+          label="Authority having jurisdiction"
+          name="authorityName"
+          optional
+          defaultValue={site?.authorityName}
+        />
+        <TextField
+          label="Its telephone"
+          name="authorityPhone"
+          type="tel"
+          optional
+          defaultValue={site?.authorityPhone}
+        />
+      </div>
       <SubmitButton>{site ? "Save" : "Add site"}</SubmitButton>
     </Form>
   );

@@ -128,16 +128,3 @@ export const MatrixRef = z.object({
   systemId: rowId,
   version: z.preprocess(blankToNull, z.union([z.null(), z.coerce.number().int().min(1)])),
 });
-
-/** Forgiving, since people type in the address bar. */
-export const PointSearch = z.object({
-  systemId: rowId,
-  page: z.coerce.number().int().min(1).max(100_000).catch(1).default(1),
-  q: z.string().trim().max(200).catch("").default(""),
-  zone: z.uuid().nullish().catch(null).default(null),
-  kind: z.enum(POINT_KINDS).nullish().catch(null).default(null),
-  proof: z.enum(["never", "failed"]).nullish().catch(null).default(null),
-  removed: z.enum(["shown"]).nullish().catch(null).default(null),
-  sort: z.enum(["walk", "address", "zone", "kind", "label", "proven"]).catch("walk").default("walk"),
-  way: z.enum(["up", "down"]).catch("up").default("up"),
-});

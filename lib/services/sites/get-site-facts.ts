@@ -22,6 +22,7 @@ export const getSiteFacts = query({
     const { zone } = await siteById(tx, siteId);
     const today = calendarDate(now, zone);
     return {
+      now,
       today,
       ...(await registersOf(tx, siteId)),
       ...(await timesOf(tx, siteId, today)),

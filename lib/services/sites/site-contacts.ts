@@ -21,6 +21,8 @@ export async function contactsOfSites(tx: Tx, siteIds: string[], now: Date) {
     .selectDistinct({
       siteId,
       id: contacts.id,
+      customerId: contacts.customerId,
+      since: contacts.createdAt,
       name: contacts.name,
       title: contacts.title,
       phone: contacts.phone,

@@ -22,7 +22,7 @@ test("addresses sort as people count", async () => {
   const systemId = await bareSystem(w);
   for (const address of ["L1-10", "L2-1", "L1-9"]) await device(systemId, address);
   expect(await addresses({ systemId, sort: "address" })).toEqual(["L1-9", "L1-10", "L2-1"]);
-  expect(await addresses({ systemId, sort: "address", way: "down" })).toEqual(["L2-1", "L1-10", "L1-9"]);
+  expect(await addresses({ systemId, sort: "-address" })).toEqual(["L2-1", "L1-10", "L1-9"]);
 });
 
 test("filters by text, kind and zone narrow the list", async () => {

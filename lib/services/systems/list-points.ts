@@ -1,14 +1,25 @@
 import { and, asc, count, desc, eq, exists, ilike, isNull, not, or, type SQL, sql } from "drizzle-orm";
+import { z } from "zod";
 import type { Tx } from "@/db/client";
 import { proofs } from "@/db/schema/proofs";
 import { points, zones } from "@/db/schema/systems";
-import { PointSearch } from "@/lib/domain/systems/schemas";
+import { rowId } from "@/lib/domain/shared/inputs";
+import { POINT_KINDS } from "@/lib/domain/systems/words";
 import { query } from "@/lib/services/command";
-import { containing } from "@/lib/services/paging";
+import { containing, offsetOf, orderBy, PageInput, sortInput } from "@/lib/services/paging";
 import { naturally, systemById } from "./internal";
 import { lastProofs, tellsOfOne } from "./proofs";
 
 const DEVICES_A_PAGE = 50;
+
+const PointSearch = PageInput.omit({ pageSize: true }).extend({
+  systemId: rowId,
+  zone: z.uuid().nullish().catch(null).default(null),
+  kind: z.enum(POINT_KINDS).nullish().catch(null).default(null),
+  proof: z.enum(["never", "failed"]).nullish().catch(null).default(null),
+  removed: z.enum(["shown"]).nullish().catch(null).default(null),
+  sort: sortInput(["address", "zone", "kind", "label", "proven"]),
+});
 
 /** The devices of a system, filtered, sorted and by pages. */
 export const listPoints = query({
@@ -30,23 +41,22 @@ export const listPoints = query({
       .select({ on: sql`max(${proofs.provenOn})` })
       .from(proofs)
       .where(and(eq(proofs.companyId, points.companyId), eq(proofs.pointId, points.id), eq(proofs.outcome, "proven")));
-    const keys: Record<typeof search.sort, SQL[]> = {
-      walk: [sql`${points.walkOrder}`, naturally(zones.key), naturally(points.address)],
-      address: [naturally(points.address)],
-      zone: [naturally(zones.key), naturally(points.address)],
-      kind: [sql`${points.kind}`, naturally(points.address)],
-      label: [sql`${points.label}`],
-      proven: [sql`(${lastProven})`, naturally(points.address)],
+    const columns = {
+      address: naturally(points.address),
+      zone: naturally(zones.key),
+      kind: points.kind,
+      label: points.label,
+      proven: sql`(${lastProven})`,
     };
-    const way = search.way === "down" ? desc : asc;
+    const asWalked = [asc(points.walkOrder), asc(naturally(zones.key)), asc(naturally(points.address)), asc(points.id)];
     const rows = await tx
       .select({ point: points, zone: { id: zones.id, key: zones.key, name: zones.name } })
       .from(points)
       .leftJoin(zones, and(eq(zones.companyId, points.companyId), eq(zones.id, points.zoneId)))
       .where(where)
-      .orderBy(...keys[search.sort].map((key) => way(key)), points.id)
+      .orderBy(...orderBy(search.sort, columns, asWalked))
       .limit(DEVICES_A_PAGE)
-      .offset((page - 1) * DEVICES_A_PAGE);
+      .offset(offsetOf(page, DEVICES_A_PAGE));
     const [all] = await tx.select({ total: count() }).from(points).where(where);
     const ids = rows.map(({ point }) => point.id);
     return {

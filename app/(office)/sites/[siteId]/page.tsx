@@ -1,23 +1,125 @@
 import type { Metadata } from "next";
-import { PageHeader, Section } from "@/components/layout/page-header";
-import { SiteForm } from "@/components/sites/site-form";
-import { SiteSummary } from "@/components/sites/site-summary";
-import { zonesOfCountry } from "@/lib/domain/shared/zone";
+import Link from "next/link";
+import { frame } from "@/app/frame";
+import { PageHeader } from "@/components/layout/page-header";
+import { AccessSection } from "@/components/sites/access-section";
+import { PapersSection } from "@/components/sites/papers-section";
+import { PeopleSection } from "@/components/sites/people-section";
+import { PlaceSection } from "@/components/sites/place-section";
+import { SiteNav, SitePart } from "@/components/sites/site-nav";
+import { WindowsSection } from "@/components/sites/windows-section";
+import { SystemsSection, WorkSection } from "@/components/sites/work-section";
+import { Button } from "@/components/ui/button";
+import { paths } from "@/lib/domain/shared/paths";
+import { mayDo } from "@/lib/domain/shared/permissions";
+import { listCustomerChoices } from "@/lib/services/customers/list-customer-choices";
 import { getSite } from "@/lib/services/sites/get-site";
+import { getSiteFacts } from "@/lib/services/sites/get-site-facts";
 import { read } from "@/lib/web/page";
-import { updateSiteAction } from "../actions";
+import * as actions from "../actions";
 
 export const metadata: Metadata = { title: "Site" };
 
 export default async function SitePage({ params }: PageProps<"/sites/[siteId]">) {
-  const site = await read(getSite, await params);
+  const { siteId } = await params;
+  const { role } = await frame();
+  const [site, facts, customers] = [
+    await read(getSite, { siteId }),
+    await read(getSiteFacts, { siteId }),
+    await read(listCustomerChoices),
+  ];
+  const mayChange = mayDo(role, "site:write");
+  const shared = { siteId, mayChange };
   return (
     <>
-      <PageHeader title={site.name} note={`${site.street}, ${site.city}, ${site.state} ${site.postalCode}`} />
-      <SiteSummary site={site} />
-      <Section title="Change">
-        <SiteForm action={updateSiteAction} zones={zonesOfCountry("US")} zone={site.zone} site={site} />
-      </Section>
+      <PageHeader
+        trail={[{ label: "Sites", href: paths.sites }]}
+        title={site.name}
+        note={`${site.street}, ${site.city}, ${site.state} ${site.postalCode}`}
+        actions={
+          <>
+            {mayDo(role, "job:write") && (
+              <Button asChild>
+                <Link href={paths.newJob(siteId)}>New job</Link>
+              </Button>
+            )}
+            {mayChange && (
+              <Button asChild>
+                <Link href={paths.editSite(siteId)}>Edit</Link>
+              </Button>
+            )}
+          </>
+        }
+      />
+      <SiteNav />
+      <div className="grid items-start gap-5 lg:grid-cols-2">
+        <SitePart id="place">
+          <PlaceSection site={site} />
+        </SitePart>
+        <SitePart id="people">
+          <PeopleSection
+            {...shared}
+            today={facts.today}
+            holders={site.holders}
+            contacts={site.contacts}
+            customers={customers}
+            actions={{ add: actions.addHolderAction, end: actions.endHolderAction }}
+          />
+        </SitePart>
+      </div>
+      <SitePart id="windows">
+        <WindowsSection
+          {...shared}
+          zone={site.zone}
+          now={facts.now}
+          windows={facts.windows}
+          noTestDates={facts.noTestDates}
+          attendances={facts.attendances}
+          contacts={site.contacts}
+          actions={{
+            addWindow: actions.addWindowAction,
+            endWindow: actions.endWindowAction,
+            addNoTest: actions.addNoTestAction,
+            endNoTest: actions.endNoTestAction,
+            addAttendance: actions.addAttendanceAction,
+            endAttendance: actions.endAttendanceAction,
+          }}
+        />
+      </SitePart>
+      <SitePart id="access">
+        <AccessSection
+          {...shared}
+          mayLook={mayDo(role, "secret:look")}
+          accessNote={site.accessNote}
+          keys={facts.keys}
+          secrets={facts.secrets}
+          stationAccounts={facts.stationAccounts}
+          actions={{
+            addKey: actions.addKeyAction,
+            handOverKey: actions.handOverKeyAction,
+            endKey: actions.endKeyAction,
+            addSecret: actions.addSecretAction,
+            endSecret: actions.endSecretAction,
+            addStationAccount: actions.addStationAccountAction,
+            endStationAccount: actions.endStationAccountAction,
+          }}
+        />
+      </SitePart>
+      <div className="grid items-start gap-5 lg:grid-cols-2">
+        <SitePart id="systems">
+          <SystemsSection {...shared} systems={facts.systems} />
+        </SitePart>
+        <SitePart id="papers">
+          <PapersSection
+            {...shared}
+            documents={facts.documents}
+            actions={{ add: actions.addDocumentAction, end: actions.endDocumentAction }}
+          />
+        </SitePart>
+      </div>
+      <SitePart id="work">
+        <WorkSection jobs={facts.jobs} visits={site.visits} />
+      </SitePart>
     </>
   );
 }
