@@ -4,6 +4,7 @@ import { useQuery } from "@tanstack/react-query";
 import { useRouter } from "next/navigation";
 import { useState } from "react";
 import { toast } from "sonner";
+import { Button } from "@/components/ui/button";
 import { Input } from "@/components/ui/input";
 import { Label } from "@/components/ui/label";
 import { placesQuery, timeOf } from "@/lib/queries/visits";
@@ -11,7 +12,18 @@ import { BookingForm } from "./booking-form";
 import { standingBy } from "./booking-panel";
 
 /** Books a visit of one job from the job's own page: the first place of the day that nothing stands against is offered. */
-export function BookVisit({ jobId, date: first }: { jobId: string; date: string }) {
+export function BookVisit(props: { jobId: string; date: string }) {
+  const [open, setOpen] = useState(false);
+  if (!open)
+    return (
+      <Button variant="primary" className="justify-self-start" onClick={() => setOpen(true)}>
+        Book a visit
+      </Button>
+    );
+  return <Booking {...props} onClose={() => setOpen(false)} />;
+}
+
+function Booking({ jobId, date: first, onClose }: { jobId: string; date: string; onClose: () => void }) {
   const router = useRouter();
   const [date, setDate] = useState(first);
   const { data: places, error } = useQuery(placesQuery({ jobId, date, stepMinutes: 15 }));
@@ -53,6 +65,7 @@ export function BookVisit({ jobId, date: first }: { jobId: string; date: string 
           }}
           onDone={(message) => {
             toast.success(message);
+            onClose();
             router.refresh();
           }}
         />

@@ -10,6 +10,8 @@ import { JobWaits } from "@/components/jobs/waits";
 import { PageHeader, Section } from "@/components/layout/page-header";
 import { Badge } from "@/components/ui/badge";
 import { EmptyState } from "@/components/ui/card";
+import { TextLink } from "@/components/ui/text-link";
+import { BookVisit } from "@/components/visits/book-visit";
 import { paths } from "@/lib/domain/shared/paths";
 import { getJob } from "@/lib/services/jobs/get-job";
 import { read } from "@/lib/web/page";
@@ -51,10 +53,14 @@ export default async function JobPage({ params }: PageProps<"/jobs/[jobId]">) {
                 <span className="figures">
                   {visit.startsLocal.replace("T", " ")} to {visit.endsLocal.slice(11)}
                 </span>{" "}
-                {visit.crew.join(", ")}
+                {visit.crew.join(", ")}{" "}
+                <TextLink href={paths.runSheet(visit.startsLocal.slice(0, 10))}>on the run sheet</TextLink>
               </li>
             ))}
           </ol>
+          {open && ROLE_GRANTS[role].includes("visit:write") && (
+            <BookVisit jobId={job.id} date={firstDay(job.today, job.window?.earliest)} />
+          )}
         </Section>
       </section>
       <div className="grid gap-5 lg:grid-cols-2">
@@ -101,3 +107,9 @@ export default async function JobPage({ params }: PageProps<"/jobs/[jobId]">) {
     </>
   );
 }
+
+/** Tomorrow, unless the due window opens later. */
+const firstDay = (today: string, earliest: string | undefined): string => {
+  const tomorrow = addDays(today, 1);
+  return earliest && earliest > tomorrow ? earliest : tomorrow;
+};
