@@ -1,12 +1,11 @@
 import type { Metadata } from "next";
 import Link from "next/link";
+import { may } from "@/app/frame";
 import { PageHeader } from "@/components/layout/page-header";
 import { Button } from "@/components/ui/button";
 import { RunSheet } from "@/components/visits/run-sheet";
 import { paths } from "@/lib/domain/shared/paths";
-import { ROLE_GRANTS } from "@/lib/domain/shared/permissions";
 import { addDays, dateWords } from "@/lib/domain/shared/zone";
-import { getFrame } from "@/lib/services/company/get-frame";
 import { getRunSheet } from "@/lib/services/visits/get-run-sheet";
 import { read } from "@/lib/web/page";
 
@@ -15,7 +14,6 @@ export const metadata: Metadata = { title: "Run sheet" };
 export default async function RunSheetPage({ searchParams }: PageProps<"/run-sheet">) {
   const { date } = await searchParams;
   const sheet = await read(getRunSheet, { date });
-  const { role } = await read(getFrame);
   const to = (day: string, word: string) => (
     <Button asChild>
       <Link href={paths.runSheet(day)}>{word}</Link>
@@ -34,7 +32,7 @@ export default async function RunSheetPage({ searchParams }: PageProps<"/run-she
           </>
         }
       />
-      <RunSheet key={sheet.date} initial={sheet} mayWrite={ROLE_GRANTS[role].includes("visit:write")} />
+      <RunSheet key={sheet.date} initial={sheet} mayWrite={await may("visit:write")} />
     </>
   );
 }

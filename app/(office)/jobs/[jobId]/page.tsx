@@ -13,6 +13,7 @@ import { EmptyState } from "@/components/ui/card";
 import { TextLink } from "@/components/ui/text-link";
 import { BookVisit } from "@/components/visits/book-visit";
 import { paths } from "@/lib/domain/shared/paths";
+import { addDays } from "@/lib/domain/shared/zone";
 import { getJob } from "@/lib/services/jobs/get-job";
 import { read } from "@/lib/web/page";
 import {
@@ -58,7 +59,7 @@ export default async function JobPage({ params }: PageProps<"/jobs/[jobId]">) {
               </li>
             ))}
           </ol>
-          {open && ROLE_GRANTS[role].includes("visit:write") && (
+          {open && (await may("visit:write")) && (
             <BookVisit jobId={job.id} date={firstDay(job.today, job.window?.earliest)} />
           )}
         </Section>
