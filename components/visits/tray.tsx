@@ -4,6 +4,7 @@ import { useRef, useState } from "react";
 import { Badge } from "@/components/ui/badge";
 import { EmptyState } from "@/components/ui/card";
 import { cn } from "@/components/ui/cn";
+import { Input } from "@/components/ui/input";
 import { JOB_KIND_WORDS, WAITS_FOR_WORDS } from "@/lib/domain/jobs/words";
 import { minutesWords } from "@/lib/domain/visits/minutes-words";
 import type { Sheet, TrayJob } from "@/lib/queries/visits";
@@ -13,10 +14,12 @@ type Props = { tray: Sheet["tray"]; takenId: string | null; onTake: (job: TrayJo
 /** Jobs to book, those first whose time runs out first. One stop of the Tab key; arrows go through the list. */
 export function Tray({ tray, takenId, onTake }: Props) {
   const [at, setAt] = useState(0);
+  const [q, setQ] = useState("");
+  const shown = tray.jobs.filter((job) => wordsOf(job).includes(q.trim().toLowerCase()));
   const list = useRef<HTMLOListElement>(null);
   const go = (event: React.KeyboardEvent, i: number) => {
-    const to = { ArrowDown: i + 1, ArrowUp: i - 1, Home: 0, End: tray.jobs.length - 1 }[event.key];
-    if (to === undefined || !tray.jobs[to]) return;
+    const to = { ArrowDown: i + 1, ArrowUp: i - 1, Home: 0, End: shown.length - 1 }[event.key];
+    if (to === undefined || !shown[to]) return;
     event.preventDefault();
     setAt(to);
     list.current?.querySelectorAll<HTMLElement>("button")[to]?.focus();
@@ -30,12 +33,22 @@ export function Tray({ tray, takenId, onTake }: Props) {
       {tray.jobs.length === 0 && (
         <EmptyState title="Nothing waits to be booked">Jobs appear here as soon as they are made.</EmptyState>
       )}
+      {tray.jobs.length > 0 && (
+        <Input
+          type="search"
+          aria-label="Site, number or words of a job"
+          placeholder="Site, number or words"
+          value={q}
+          onChange={(event) => setQ(event.target.value)}
+        />
+      )}
+      {tray.jobs.length > 0 && shown.length === 0 && <p className="text-sm text-muted">No job to book says that.</p>}
       <ol ref={list} className="grid max-h-[40dvh] gap-2 overflow-y-auto p-1 xl:max-h-[70dvh]">
-        {tray.jobs.map((job, i) => (
+        {shown.map((job, i) => (
           <li key={job.id}>
             <button
               type="button"
-              tabIndex={i === Math.min(at, tray.jobs.length - 1) ? 0 : -1}
+              tabIndex={i === Math.min(at, shown.length - 1) ? 0 : -1}
               aria-pressed={takenId === job.id}
               onKeyDown={(event) => go(event, i)}
               onFocus={() => setAt(i)}
@@ -70,6 +83,9 @@ export function Tray({ tray, takenId, onTake }: Props) {
     </section>
   );
 }
+
+const wordsOf = ({ number, title, site }: TrayJob): string =>
+  `${number} ${title} ${site.name} ${site.city}`.toLowerCase();
 
 const SOON_DAYS = 14;
 

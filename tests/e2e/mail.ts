@@ -22,3 +22,19 @@ export async function nextLetter(to: string, after: string): Promise<Letter> {
   if (!letter) throw new Error(`no letter to ${to} within a minute`);
   return letter;
 }
+
+/** The letter to an address whose subject says all these words, the moment it arrives: for inboxes that tests share. */
+export async function letterSaying(to: string, ...words: string[]): Promise<Letter> {
+  let after = "0";
+  for (const end = Date.now() + 60_000; Date.now() < end; ) {
+    const found = await letters(to, { after, wait: "10" });
+    const letter = found.find(({ subject }) => words.every((word) => subject.includes(word)));
+    if (letter) return letter;
+    after = found.at(-1)?.id ?? after;
+  }
+  throw new Error(`no letter to ${to} says ${words.join(", ")} within a minute`);
+}
+
+/** A letter byte for byte. */
+export const rawLetter = async (id: string): Promise<Buffer> =>
+  Buffer.from(await (await fetch(`${inbox()}/messages/${id}/raw`)).arrayBuffer());

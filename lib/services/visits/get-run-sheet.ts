@@ -14,7 +14,7 @@ import { notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
 import { asksOf, visitsBetween } from "./internal";
 
-const MOST_IN_TRAY = 100;
+const MOST_IN_TRAY = 300;
 const ROW_MS = 30 * 60_000;
 
 /** One day of all crews, in the company's zone, and what waits to be booked. */
