@@ -23,7 +23,7 @@ type Props = {
 /** A site found by typing a part of its name, street or city; arrows and Enter choose. Posts `siteId`. */
 export function SiteField({ chosen, onChoose, offered = [], autoFocus }: Props) {
   const [typed, setTyped] = useState("");
-  const [open, setOpen] = useState(false);
+  const [focused, setFocused] = useState(false);
   const q = useDeferredValue(typed.trim());
   const { data, isFetching } = useQuery(findQuery(q));
   const box = useRef<HTMLInputElement>(null);
@@ -37,7 +37,7 @@ export function SiteField({ chosen, onChoose, offered = [], autoFocus }: Props) 
   const choose = (site: SiteChoice | null) => {
     moved.current = true;
     setTyped("");
-    setOpen(false);
+    setFocused(false);
     onChoose(site);
   };
   return (
@@ -58,22 +58,23 @@ export function SiteField({ chosen, onChoose, offered = [], autoFocus }: Props) 
               </Button>
             </div>
           ) : (
-            <Command shouldFilter={false} label="Site" className="relative">
+            <Command shouldFilter={false} label="Site">
               <Command.Input asChild value={typed} onValueChange={setTyped}>
                 <Input
                   {...control}
                   ref={box}
                   autoFocus={autoFocus}
                   autoComplete="off"
-                  onFocus={() => setOpen(true)}
-                  onBlur={() => setOpen(false)}
+                  onFocus={() => setFocused(true)}
+                  onBlur={() => setFocused(false)}
                 />
               </Command.Input>
               <Command.List
-                hidden={!open || (q.length < 2 && offered.length === 0)}
+                // What was typed is answered, wherever the focus is by then.
+                hidden={q.length < 2 && !(focused && offered.length > 0)}
                 // A press would take the focus away before it is counted as a choice.
                 onMouseDown={(event) => event.preventDefault()}
-                className="absolute inset-x-0 top-full z-30 mt-1 max-h-72 overflow-y-auto rounded-md border border-line bg-surface p-1 shadow-lg"
+                className="mt-1 max-h-72 overflow-y-auto rounded-md border border-line bg-surface p-1"
               >
                 {found.map((site) => (
                   <Command.Item

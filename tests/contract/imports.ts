@@ -56,7 +56,15 @@ const RULES: Rule[] = [
   { folder: "components/ui", own: [], never: SERVER_ONLY },
   {
     folder: "components",
-    own: ["components/ui", "components/form", "components/layout", "lib/domain", "lib/queries", "lib/offline"],
+    own: [
+      "components/ui",
+      "components/form",
+      "components/layout",
+      "components/data-table",
+      "lib/domain",
+      "lib/queries",
+      "lib/offline",
+    ],
     never: SERVER_ONLY,
   },
   { folder: "app/api/auth", own: ["lib/auth/auth.ts"], packages: [] },
