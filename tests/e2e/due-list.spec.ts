@@ -48,8 +48,9 @@ test("what is agreed stands on the due list with its window and obstacles; one c
   await expect(page.getByRole("heading", { level: 1 })).toContainText("Every 5 years: elevator recall test");
   await expect(page.getByText("To book").first()).toBeVisible();
   await expect(page.getByText("gives no work without a purchase order")).toBeVisible();
-  await page.getByLabel("Purchase order").fill("PO 4711");
-  await page.locator("#terms").getByRole("button", { name: "Save" }).click();
+  const terms = page.locator("#terms");
+  await terms.getByRole("textbox", { name: /^Purchase order/ }).fill("PO 4711");
+  await terms.getByRole("button", { name: "Save" }).click();
   await expect(page.getByText("Purchase order PO 4711, no limit")).toBeVisible();
 
   await page.goto("/due-list?q=meridian+annex&kind=elevators&when=early");
