@@ -1,10 +1,11 @@
+import { ShowCode } from "@/components/form/show-code";
 import { Card } from "@/components/ui/card";
 import { FIELD_WORDS_EN as WORDS } from "@/lib/domain/field/words";
 import { JOB_KIND_WORDS } from "@/lib/domain/jobs/words";
 import type { FieldVisit } from "@/lib/queries/field";
 
 export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
-  const { site, job, crew, accessNote, contacts } = visit;
+  const { site, job, crew, accessNote, secrets, contacts } = visit;
   return (
     <Card className="grid gap-2 p-4">
       <p className="figures text-lg font-bold">
@@ -28,6 +29,13 @@ export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
           {accessNote}
         </p>
       )}
+      {secrets.map(({ id, label }) => (
+        <div key={id} className="flex flex-wrap items-center justify-between gap-2 border-l-4 border-line pl-3">
+          <span>{label}</span>
+          <ShowCode secretId={id} label={label} size="thumb" />
+        </div>
+      ))}
+      {secrets.length > 0 && <p className="text-sm text-muted">{WORDS.looksAreLogged}</p>}
       {contacts
         .filter((contact) => contact.phone)
         .map((contact) => (

@@ -69,6 +69,8 @@ async function addCustomer(owner: Context, customer: DemoCustomer, i: number): P
       state: "WA",
       postalCode: city.postalCode,
       zone: DEMO_COMPANY.zone,
+      authorityName: `${customer.city} Fire Marshal`,
+      authorityPhone: "360-555-0199",
       latitude: city.latitude + ((i * 7 + k * 3) % 11) * 0.002,
       longitude: city.longitude + ((i * 5 + k * 2) % 13) * 0.002,
     });

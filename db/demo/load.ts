@@ -13,6 +13,8 @@ import { addCustomers, hireOffice, hireTechnicians } from "./company";
 import { planLiveTests } from "./live-visits";
 import { DEMO_COMPANY, DEMO_PASSWORD } from "./people";
 import { acceptLetter, signedIn } from "./sign-up";
+import { recordSiteFacts } from "./site-facts";
+import { addDemoSystem } from "./system";
 import { planWork } from "./work";
 
 /** The last verb of loading: its audit entry says that the demo company is whole. */
@@ -37,6 +39,8 @@ async function load(now: Date): Promise<void> {
   const tests = await agreeWithCustomers(dispatcher);
   await takeCalls(dispatcher, siteIds);
   await planLiveTests(dispatcher, siteIds);
+  await recordSiteFacts(dispatcher, siteIds);
+  await addDemoSystem(dispatcher, siteIds[0]);
   const { companyId: _, ownerName, ownerEmail, ...company } = DEMO_COMPANY;
   await updateCompany(owner, company);
   console.log(

@@ -11,6 +11,8 @@ export type FieldVisit = {
   job: { number: number; kind: JobKind; title: string };
   crew: { memberId: string; name: string; lead: boolean }[];
   accessNote: string | null;
+  /** Codes that this day's crew may look at. */
+  secrets: { id: string; label: string }[];
   contacts: { name: string; title: string | null; phone: string | null }[];
 };
 

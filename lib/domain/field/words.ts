@@ -12,4 +12,5 @@ export const FIELD_WORDS_EN = {
   with: "With",
   call: "Call",
   account: "Account",
+  looksAreLogged: "Each look at a code is written down. It hides after a minute.",
 } as const;

@@ -4,6 +4,7 @@ import { asActor } from "@/db/door";
 import { auditEntries } from "@/db/schema/audit";
 import { siteSecrets } from "@/db/schema/sites";
 import { find } from "@/lib/services/find/find";
+import { getFieldDay } from "@/lib/services/visits/get-field-day";
 import { hire } from "@/tests/factories/company";
 import { rowsSeen } from "@/tests/factories/sight";
 import { CODE, newSecret } from "@/tests/factories/systems";
@@ -59,6 +60,15 @@ test("another technician, and the crew of another day, are refused, and see no s
     });
     expect(await rowsSeen(own.technician.actor, "site_secrets")).toEqual([]);
   }
+});
+
+test("the day of a technician names the codes of this day's site alone, and none of them openly", async () => {
+  const { technician, siteId, secretId } = await visited(1);
+  await visitInHours(w, technician, 60);
+  const { visits } = await getFieldDay({ ...technician.context, now: new Date() }, {});
+  expect(visits.flatMap(({ secrets }) => secrets.map(({ id }) => id))).toEqual([secretId]);
+  expect(visits.find(({ secrets }) => secrets.length > 0)?.site.id).toBe(siteId);
+  expect(JSON.stringify(visits)).not.toMatch(/sealed|7-3-5-1/);
 });
 
 test("neither the database's row nor anything read of the site holds the code", async () => {

@@ -1,7 +1,7 @@
-import { inArray } from "drizzle-orm";
+import { and, asc, inArray, isNull } from "drizzle-orm";
 import { z } from "zod";
 import { companies } from "@/db/schema/company";
-import { siteAccess } from "@/db/schema/sites";
+import { siteAccess, siteSecrets } from "@/db/schema/sites";
 import { addDays, calendarDate, startOfDate } from "@/lib/domain/shared/zone";
 import { AppError, notFound } from "@/lib/errors";
 import { query } from "@/lib/services/command";
@@ -31,6 +31,15 @@ export const getFieldDay = query({
     const siteIds = [...new Set(mine.map((visit) => visit.site.id))];
     const notes =
       siteIds.length === 0 ? [] : await tx.select().from(siteAccess).where(inArray(siteAccess.siteId, siteIds));
+    // Row-level security leaves out every day but this one. Never `sealed`.
+    const secrets =
+      siteIds.length === 0
+        ? []
+        : await tx
+            .select({ id: siteSecrets.id, siteId: siteSecrets.siteId, label: siteSecrets.label })
+            .from(siteSecrets)
+            .where(and(inArray(siteSecrets.siteId, siteIds), isNull(siteSecrets.endedAt)))
+            .orderBy(asc(siteSecrets.label));
     const people = await contactsOfSites(tx, siteIds, now);
     return {
       company,
@@ -38,6 +47,7 @@ export const getFieldDay = query({
       visits: mine.map((visit) => ({
         ...visit,
         accessNote: notes.find((note) => note.siteId === visit.site.id)?.note ?? null,
+        secrets: secrets.filter((secret) => secret.siteId === visit.site.id),
         contacts: people.filter((person) => person.siteId === visit.site.id),
       })),
     };
