@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNull, type SQL } from "drizzle-orm";
+import { and, asc, desc, eq, isNull, type SQL, sql } from "drizzle-orm";
 import type { Tx } from "@/db/client";
 import { agreementItems, agreements, completions } from "@/db/schema/agreements";
 import { customers } from "@/db/schema/customers";
@@ -11,26 +11,27 @@ import { scheduleOf } from "@/lib/services/agreements/internal";
 
 /** Every active item with its next occurrence, in one question to the database; windows are reckoned here. */
 export async function dueItems(tx: Tx, now: Date, more?: SQL) {
+  // Looked up item by item through their indexes, whatever the planner knows of the tables' sizes.
   const last = tx
-    .selectDistinctOn([completions.companyId, completions.itemId], {
-      companyId: completions.companyId,
-      itemId: completions.itemId,
-      targetOn: completions.targetOn,
-      doneOn: completions.doneOn,
-    })
+    .select({ targetOn: completions.targetOn, doneOn: completions.doneOn })
     .from(completions)
-    .orderBy(completions.companyId, completions.itemId, desc(completions.targetOn))
+    .where(and(eq(completions.companyId, agreementItems.companyId), eq(completions.itemId, agreementItems.id)))
+    .orderBy(desc(completions.targetOn))
+    .limit(1)
     .as("last");
   const open = tx
-    .selectDistinctOn([jobs.companyId, jobs.agreementItemId], {
-      companyId: jobs.companyId,
-      itemId: jobs.agreementItemId,
-      id: jobs.id,
-      number: jobs.number,
-    })
+    .select({ id: jobs.id, number: jobs.number })
     .from(jobs)
-    .where(and(isNull(jobs.canceledAt), isNull(jobs.doneOn)))
-    .orderBy(jobs.companyId, jobs.agreementItemId, asc(jobs.targetOn))
+    .where(
+      and(
+        eq(jobs.companyId, agreementItems.companyId),
+        eq(jobs.agreementItemId, agreementItems.id),
+        isNull(jobs.canceledAt),
+        isNull(jobs.doneOn),
+      ),
+    )
+    .orderBy(asc(jobs.targetOn))
+    .limit(1)
     .as("open");
   const rows = await tx
     .select({
@@ -66,8 +67,8 @@ export async function dueItems(tx: Tx, now: Date, more?: SQL) {
     )
     .innerJoin(customers, and(eq(customers.companyId, agreements.companyId), eq(customers.id, agreements.customerId)))
     .innerJoin(sites, and(eq(sites.companyId, agreementItems.companyId), eq(sites.id, agreementItems.siteId)))
-    .leftJoin(last, and(eq(last.companyId, agreementItems.companyId), eq(last.itemId, agreementItems.id)))
-    .leftJoin(open, and(eq(open.companyId, agreementItems.companyId), eq(open.itemId, agreementItems.id)))
+    .leftJoinLateral(last, sql`true`)
+    .leftJoinLateral(open, sql`true`)
     .where(and(isNull(agreementItems.endedAt), more));
   const today = todayIn(now);
   return rows
