@@ -1,6 +1,8 @@
+"use client";
+
 import { tabBarLook, tabLook } from "@/components/ui/tabs";
 
-export const SITE_SECTIONS = {
+const SITE_SECTIONS = {
   place: "Place",
   people: "People",
   windows: "Test windows",

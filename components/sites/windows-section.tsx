@@ -160,7 +160,7 @@ function WindowEntry({ window, noTestDates, now, zone, mayChange, actions }: Ent
       {window.note && <p>{window.note}</p>}
       {next ? (
         <p className="figures">
-          Next {toLocalTime(next.startsAt, zone).replace("T", " ")} to{" "}
+          {next.startsAt <= now ? "Open now, until " : `Next ${toLocalTime(next.startsAt, zone).replace("T", " ")} to `}
           {toLocalTime(next.endsAt, zone).replace("T", " ")}
         </p>
       ) : (

@@ -47,7 +47,7 @@ function Group({ group, outputs, ...props }: Props & { group: OutputGroup }) {
   return (
     <Card className="grid gap-3" aria-label={group.name}>
       <header className="flex flex-wrap items-start justify-between gap-2">
-        <div>
+        <div className="flex-1 basis-56">
           <h2 className="font-bold">
             <span className="figures text-muted">{group.key}</span> {group.name}
           </h2>

@@ -5,10 +5,18 @@ import type { Point, PointZone } from "@/lib/domain/systems/device-list";
 import { POINT_KIND_WORDS, POINT_KINDS, SIGNAL_WORDS, SIGNALS } from "@/lib/domain/systems/words";
 import { Options } from "./options";
 
-export const ZoneForm = ({ action, systemId }: { action: FormAction; systemId: string }) => (
-  <FormDialog action={action} button="Add zone" title="Add a zone" submit="Add zone" hidden={{ systemId }}>
-    <TextField label="Key" name="key" hint="Its number or letter at the panel" />
-    <TextField label="Name" name="name" />
+type ZoneProps = { action: FormAction; systemId: string; zone?: PointZone };
+
+export const ZoneForm = ({ action, systemId, zone }: ZoneProps) => (
+  <FormDialog
+    action={action}
+    button={zone ? `Edit zone ${zone.key}` : "Add zone"}
+    title={zone ? `Zone ${zone.key}` : "Add a zone"}
+    submit={zone ? "Save" : "Add zone"}
+    hidden={{ systemId, ...(zone && { id: zone.id }) }}
+  >
+    <TextField label="Key" name="key" hint="Its number or letter at the panel" defaultValue={zone?.key} />
+    <TextField label="Name" name="name" defaultValue={zone?.name} />
   </FormDialog>
 );
 

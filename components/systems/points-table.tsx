@@ -25,10 +25,12 @@ type Props = PageOf & {
 /** The devices, as one walks past them unless the address says otherwise. */
 export function PointsTable(props: Props) {
   const { systemId, zones, proofs, search, path, mayChange, actions, rows } = props;
+  const chosen = zones.find(({ id }) => id === search.zone);
   const add = mayChange && (
     <>
       <PointForm action={actions.savePoint} {...{ systemId, zones }} />
       <ZoneForm action={actions.saveZone} systemId={systemId} />
+      {chosen && <ZoneForm key={chosen.id} action={actions.saveZone} systemId={systemId} zone={chosen} />}
     </>
   );
   return (

@@ -2,7 +2,7 @@ import { PrintButton } from "@/components/form/print-button";
 import { Section } from "@/components/layout/page-header";
 import { Badge } from "@/components/ui/badge";
 import { Callout, EmptyState } from "@/components/ui/card";
-import type { InputStep, LiveStep, TestScript } from "@/lib/domain/sequences/test-script";
+import { equipmentMissing, type InputStep, type LiveStep, type TestScript } from "@/lib/domain/sequences/test-script";
 import { ACTION_WORDS, EXPECTATION_SOURCE_WORDS, POINT_KIND_WORDS, SIGNAL_WORDS } from "@/lib/domain/systems/words";
 
 type Props = { script: TestScript & { matrixVersion: number | null } };
@@ -92,22 +92,27 @@ const Live = ({ step: { number, by, signal, operates, locked } }: { step: LiveSt
     </p>
     {locked && <Lock reason={locked} />}
     <ul className="grid gap-2 pl-4">
-      {operates.map(({ group, source, delaySeconds, equipment }) => (
-        <li key={group.id}>
-          <span className="font-semibold">{group.name}</span>{" "}
-          {delaySeconds > 0 && <span className="figures">after {delaySeconds} s</span>}
-          <span className="text-sm text-muted"> {EXPECTATION_SOURCE_WORDS[source].toLowerCase()}</span>
-          <ul className="pl-4 text-sm">
-            {equipment.map(({ id, tag, action, longestOffMinutes }) => (
-              <li key={id}>
-                <span className="figures">{tag}</span> {ACTION_WORDS[action]}
-                {longestOffMinutes !== null && `, off at most ${longestOffMinutes} min`}
-              </li>
-            ))}
-            {equipment.length === 0 && <li className="text-muted">No equipment recorded: write down what operates</li>}
-          </ul>
-        </li>
-      ))}
+      {operates.map((operation) => {
+        const { group, source, delaySeconds, equipment } = operation;
+        return (
+          <li key={group.id}>
+            <span className="font-semibold">{group.name}</span>{" "}
+            {delaySeconds > 0 && <span className="figures">after {delaySeconds} s</span>}
+            <span className="text-sm text-muted"> {EXPECTATION_SOURCE_WORDS[source].toLowerCase()}</span>
+            <ul className="pl-4 text-sm">
+              {equipment.map(({ id, tag, action, longestOffMinutes }) => (
+                <li key={id}>
+                  <span className="figures">{tag}</span> {ACTION_WORDS[action]}
+                  {longestOffMinutes !== null && `, off at most ${longestOffMinutes} min`}
+                </li>
+              ))}
+              {equipmentMissing(operation) && (
+                <li className="text-muted">No equipment recorded: write down what operates</li>
+              )}
+            </ul>
+          </li>
+        );
+      })}
     </ul>
   </li>
 );

@@ -7,7 +7,7 @@ import {
   type Point,
   type PointZone,
 } from "../systems/device-list";
-import type { ExpectationSource, Signal } from "../systems/words";
+import type { ExpectationSource, Signal, SystemFunction } from "../systems/words";
 import type { MatrixCell, MatrixVersion } from "./matrix";
 import type { Method, ScriptRule } from "./script-rules";
 
@@ -48,6 +48,13 @@ export type TestScript = {
   /** What the script does not know. */
   notes: readonly string[];
 };
+
+/** Heard, seen or received by itself; other functions show at the equipment behind them. */
+const SHOW_BY_THEMSELVES: readonly SystemFunction[] = ["notification", "off_site_signal"];
+
+/** Whether it is not known what must happen. */
+export const equipmentMissing = ({ group, equipment }: Operation): boolean =>
+  equipment.length === 0 && !SHOW_BY_THEMSELVES.includes(group.function);
 
 const LOCKED = "Releasing: locked until physical isolation is recorded, by whom and seen by whom";
 const UNKNOWN_RELEASE =
@@ -213,7 +220,7 @@ function notesOf(list: DeviceList, matrix: MatrixVersion | null, index: Index, l
     ...(live.some(({ by }) => by === null)
       ? ["Some groups are operated by inputs that are not on the list any more: find out what operates them now"]
       : []),
-    ...(live.some(({ operates }) => operates.some(({ equipment }) => equipment.length === 0))
+    ...(live.some(({ operates }) => operates.some(equipmentMissing))
       ? ["Behind some groups no equipment is recorded: write down what operates"]
       : []),
   ];
