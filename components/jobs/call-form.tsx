@@ -44,7 +44,7 @@ export function CallForm({ action, site: given }: { action: FormAction; site: Si
             onChange={change("phone")}
           />
         </div>
-        <CheckboxField label="Urgent" name="urgent" as="switch" hint="Stands first on every list" />
+        <CheckboxField label="Urgent" name="urgent" as="switch" hint="Marked on every list and on its page" />
         <TextareaField label="In more words" name="details" optional />
         <div className="grid gap-4 sm:grid-cols-2">
           <SelectField label="Kind" name="kind" defaultValue="service_call">

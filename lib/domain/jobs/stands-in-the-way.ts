@@ -57,7 +57,7 @@ export function standsInTheWay(facts: DueFacts): Obstacle[] {
   const to = laterOf(window.latest, today);
   if (agreementEndsOn !== null && agreementEndsOn < from)
     add("agreement_ends", `The agreement ends ${dateWords(agreementEndsOn)}`, agreement);
-  if (!facts.hasContactWithEmail) add("no_contact", "No contact with an e-mail address", `${site}#contacts`);
+  if (!facts.hasContactWithEmail) add("no_contact", "No contact with an e-mail address", `${site}#people`);
   const shut = facts.functions.filter((one) => !facts.testWindows.some((open) => opens(open, one, from, to)));
   if (shut.length > 0) add("no_window", `No test window for ${listOf(shut)}`, `${site}#windows`);
   const forbidden = facts.functions.filter((one) => covers(facts.noTestDates, one, from, to));
