@@ -26,7 +26,7 @@ export function ShowCode({
   }, [data, reset]);
   return (
     <span className="flex flex-wrap items-center gap-2" data-print="off">
-      <span role="status" className="figures text-lg font-bold select-all empty:hidden">
+      <span role="status" className="figures text-lg font-bold select-all empty:absolute">
         {data?.code}
       </span>
       {look.error && (

@@ -78,10 +78,14 @@ export function MatrixGrid({ rows, groups, cells, proofs, unsaved, editable, onP
         const place = onKey(event);
         if (place) go(place);
       }}
+      // However the focus came: a screen reader's own keys move it too.
+      onFocus={(event) => {
+        const [row, column] = placeUnder(event.target);
+        if (row !== undefined && column !== undefined) setActive({ row, column });
+      }}
       onClick={(event) => {
         const [row, column] = placeUnder(event.target);
         if (row === undefined || column === undefined) return;
-        setActive({ row, column });
         press({ row, column });
       }}
     >
