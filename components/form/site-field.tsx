@@ -59,7 +59,15 @@ export function SiteField({ chosen, onChoose, offered = [], autoFocus }: Props) 
             </div>
           ) : (
             <Command shouldFilter={false} label="Site">
-              <Command.Input asChild value={typed} onValueChange={setTyped}>
+              <Command.Input
+                asChild
+                value={typed}
+                onValueChange={(value) => {
+                  setTyped(value);
+                  // The focus may have come before the script did.
+                  setOpen(true);
+                }}
+              >
                 <Input
                   {...control}
                   ref={box}
