@@ -28,9 +28,10 @@ async function newShutdownTest(page: Page): Promise<string> {
   await page.getByLabel("What is wrong").fill(title);
   await page.getByRole("button", { name: "Make the job" }).click();
   await expect(page.getByRole("heading", { level: 1, name: title })).toBeVisible();
-  await page.getByRole("checkbox", { name: "Fan shutdown" }).check();
-  await page.getByRole("button", { name: "Save", exact: true }).click();
-  await expect(page.getByText("Fan shutdown").first()).toBeVisible();
+  const change = page.getByRole("region", { name: "Change" });
+  await change.getByRole("checkbox", { name: "Fan shutdown" }).check();
+  await change.getByRole("button", { name: "Save", exact: true }).click();
+  await expect(change.getByText("Job saved")).toBeVisible();
   return title;
 }
 

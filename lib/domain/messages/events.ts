@@ -20,7 +20,10 @@ export const MailTemplate = z.discriminatedUnion("template", [
   z.object({ template: z.literal("password-reset"), companyName: z.string() }),
   z.object({ template: z.literal("password-changed"), companyName: z.string(), name: z.string() }),
   VisitLetter.extend({ template: z.literal("visit-asked") }),
-  VisitLetter.extend({ template: z.literal("visit-moved"), before: z.object({ startsLocal: z.string(), endsLocal: z.string() }) }),
+  VisitLetter.extend({
+    template: z.literal("visit-moved"),
+    before: z.object({ startsLocal: z.string(), endsLocal: z.string() }),
+  }),
   VisitLetter.extend({ template: z.literal("visit-canceled"), reason: z.string() }),
 ]);
 export type MailTemplate = z.infer<typeof MailTemplate>;

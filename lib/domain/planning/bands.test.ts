@@ -47,7 +47,9 @@ test("a place costs the way from the visit before, overtime beyond eight hours, 
   const found = costOf({ ...place, span, errands: [errand] });
   // By hand: 0.09 degrees of latitude are 10.0 km; the travel estimate of ten kilometers is 22 minutes.
   expect(found).toEqual({ travel: { minutes: 22, from: "Cold Store" }, tight: true, overtimeMinutes: 60, daysLate: 3 });
-  expect(costWords(found)).toBe("about 22 min from Cold Store, the way takes longer than the gap, 1 h over 8 h, 3 days past due");
+  expect(costWords(found)).toBe(
+    "about 22 min from Cold Store, the way takes longer than the gap, 1 h over 8 h, 3 days past due",
+  );
   const early = { startsAt: at("03:00"), endsAt: at("05:00") };
   expect(costOf({ ...place, span: early, errands: [errand] }).travel?.from).toBe("home");
 });

@@ -113,7 +113,10 @@ describe("the site", () => {
   test("lets each function operate in its own window", () => {
     expect(codes(visit, { ...place, startsLocal: "2026-12-08T06:30" }, facts)).toEqual(["outside_window"]);
     expect(codes(visit, { ...place, startsLocal: "2026-12-09T06:00" }, facts)).toEqual(["outside_window"]);
-    const both = { ...visit, liveBlocks: [{ offsetMinutes: 0, minutes: 60, functions: ["fan_shutdown", "notification"] }] };
+    const both = {
+      ...visit,
+      liveBlocks: [{ offsetMinutes: 0, minutes: 60, functions: ["fan_shutdown", "notification"] }],
+    };
     const reasons = slotReasons(both as WantedVisit, place, facts);
     expect(reasons.map(({ words }) => words)).toEqual([
       "Notification: the live block lies outside every window of the site",
@@ -192,7 +195,11 @@ describe("nights of clock change", () => {
 
 describe("whatever else is booked", () => {
   const minute = fc.integer({ min: -3 * 1440, max: 3 * 1440 });
-  const other = fc.record({ from: minute, minutes: fc.integer({ min: 5, max: 600 }), memberId: fc.constantFrom(DARA, KOFI) });
+  const other = fc.record({
+    from: minute,
+    minutes: fc.integer({ min: 5, max: 600 }),
+    memberId: fc.constantFrom(DARA, KOFI),
+  });
   const span = spanFrom(toInstant(place.startsLocal, ZONE), visit.minutes);
   const errand = ({ from, minutes, memberId }: { from: number; minutes: number; memberId: string }) => ({
     memberId,
