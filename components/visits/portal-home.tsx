@@ -24,7 +24,7 @@ export function PortalHome({ company, sites, visits, now }: Props) {
   const standing = visits.filter((visit) => !visit.canceledAt);
   return (
     <>
-      <PageHeader title="Your buildings" note={`${company.name}, ${company.phone}`} />
+      <PageHeader title="Your buildings" note={company.name} />
       <Section title="Coming visits">
         <Visits visits={standing.filter((visit) => visit.startsAt >= now)} none="No visit is planned" />
       </Section>

@@ -12,4 +12,6 @@ export const FIELD_WORDS_EN = {
   with: "With",
   call: "Call",
   account: "Account",
+  skip: "To the content",
+  main: "Main",
 } as const;
