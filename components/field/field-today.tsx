@@ -40,22 +40,29 @@ export function FieldToday() {
       {!data && !error && <PageSkeleton label={WORDS.loading} />}
       {data && (
         <>
-          <List visits={standing.filter(isToday)} none={WORDS.nothingToday} more={WORDS.nothingTodayNext} />
+          <List
+            visits={standing.filter(isToday)}
+            none={WORDS.nothingToday}
+            more={WORDS.nothingTodayNext}
+            heading="h2"
+          />
           <h2 className="text-lg font-bold">{WORDS.later}</h2>
-          <List visits={standing.filter((visit) => !isToday(visit))} none={WORDS.nothingLater} />
+          <List visits={standing.filter((visit) => !isToday(visit))} none={WORDS.nothingLater} heading="h3" />
         </>
       )}
     </FieldShell>
   );
 }
 
-function List({ visits, none, more }: { visits: FieldVisit[]; none: string; more?: string }) {
+type ListProps = { visits: FieldVisit[]; none: string; more?: string; heading: "h2" | "h3" };
+
+function List({ visits, none, more, heading }: ListProps) {
   if (visits.length === 0) return <EmptyState title={none}>{more}</EmptyState>;
   return (
     <ol className="grid gap-3">
       {visits.map((visit) => (
         <li key={visit.id}>
-          <FieldVisitCard visit={visit} />
+          <FieldVisitCard visit={visit} heading={heading} />
         </li>
       ))}
     </ol>

@@ -3,14 +3,14 @@ import { FIELD_WORDS_EN as WORDS } from "@/lib/domain/field/words";
 import { JOB_KIND_WORDS } from "@/lib/domain/jobs/words";
 import type { FieldVisit } from "@/lib/queries/field";
 
-export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
+export function FieldVisitCard({ visit, heading: Heading }: { visit: FieldVisit; heading: "h2" | "h3" }) {
   const { site, job, crew, accessNote, contacts } = visit;
   return (
     <Card className="grid gap-2 p-4">
       <p className="figures text-lg font-bold">
         {visit.startsLocal.replace("T", " ")}–{visit.endsLocal.slice(11)}
       </p>
-      <h3 className="text-lg font-bold">{site.name}</h3>
+      <Heading className="text-lg font-bold">{site.name}</Heading>
       <p>
         {site.street}, {site.city}
       </p>
