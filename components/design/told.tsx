@@ -1,6 +1,9 @@
 "use client";
 
 import { toast } from "sonner";
+import type { Search } from "@/components/data-table/address";
+import { DataTable } from "@/components/data-table/data-table";
+import { SearchBar } from "@/components/data-table/paged-table";
 import { Avatar } from "@/components/ui/avatar";
 import { Badge } from "@/components/ui/badge";
 import { Breadcrumb } from "@/components/ui/breadcrumb";
@@ -11,7 +14,6 @@ import { Progress } from "@/components/ui/progress";
 import { Separator } from "@/components/ui/separator";
 import { PageSkeleton } from "@/components/ui/skeleton";
 import { Spinner } from "@/components/ui/spinner";
-import { Table, Td, Th } from "@/components/ui/table";
 import { Group } from "./group";
 
 export function Told() {
@@ -50,22 +52,37 @@ export function Told() {
         <Breadcrumb trail={[{ label: "Sites", href: "/design" }]} />
         <Separator />
       </Group>
-      <Group title="A table">
-        <Table>
-          <thead>
-            <tr>
-              <Th>Tag</Th>
-              <Th>Seconds</Th>
-            </tr>
-          </thead>
-          <tbody>
-            <tr>
-              <Td>SF-3</Td>
-              <Td className="figures">42</Td>
-            </tr>
-          </tbody>
-        </Table>
+      <Group title="A list, one with nothing that fits, one with nothing yet">
+        <Fans rows={FANS} />
+        <Fans rows={[]} search={{ q: "boiler" }} />
+        <Fans rows={[]} />
       </Group>
     </>
+  );
+}
+
+const FANS = [
+  { tag: "SF-3", floor: "Roof", seconds: 42 },
+  { tag: "EF-11", floor: "Basement", seconds: 118 },
+];
+
+function Fans({ rows, search = { sort: "tag" } }: { rows: typeof FANS; search?: Search }) {
+  const path = "/design";
+  return (
+    <div className="w-full">
+      <DataTable
+        {...{ rows, path, search, page: 1, pageSize: 25, total: rows.length }}
+        caption="Fans"
+        rowKey={(fan) => fan.tag}
+        filters={<SearchBar path={path} label="Tag" />}
+        exportHref={path}
+        empty={<EmptyState title="No fans yet">Import the device list.</EmptyState>}
+        columns={[
+          { key: "tag", header: "Tag", sortable: true, figures: true, cell: (fan) => fan.tag },
+          { key: "floor", header: "Floor", sortable: true, cell: (fan) => fan.floor },
+          { key: "seconds", header: "Coast-down, s", figures: true, end: true, cell: (fan) => fan.seconds },
+        ]}
+      />
+    </div>
   );
 }
