@@ -21,7 +21,8 @@ export const paths = {
   deliveries: "/settings/deliveries",
   field: "/field",
   /** The same list as a file, with the filters and order of the address. */
-  listFile: (list: "sites" | "customers" | "people" | "audit") => `/${list}/export.csv`,
+  listFile: (list: "sites" | "customers" | "people" | "jobs" | "audit" | "settings/deliveries") =>
+    `/${list}/export.csv`,
   portal: "/portal",
   portalSite: (id: string) => `/portal/sites/${id}`,
 } as const;

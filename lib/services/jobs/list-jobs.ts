@@ -4,15 +4,20 @@ import { jobs } from "@/db/schema/jobs";
 import { sites } from "@/db/schema/sites";
 import { JOB_KINDS } from "@/lib/domain/jobs/words";
 import { query } from "@/lib/services/command";
-import { containing, offsetOf, PAGE_SIZE, PageInput } from "@/lib/services/paging";
+import { containing, offsetOf, orderBy, PageInput, sortInput } from "@/lib/services/paging";
 
-const ListJobsInput = PageInput.extend({ kind: z.enum(JOB_KINDS).nullish().catch(null).default(null) });
+const SORTS = { number: jobs.number, kind: jobs.kind, title: jobs.title, site: sites.name };
+
+const ListJobsInput = PageInput.extend({
+  kind: z.enum(JOB_KINDS).nullish().catch(null).default(null),
+  sort: sortInput(["number", "kind", "title", "site"]),
+});
 
 export const listJobs = query({
   name: "job.list",
   needs: "job:read",
   input: ListJobsInput,
-  async run({ tx }, { page, q, kind }) {
+  async run({ tx }, { page, pageSize, q, kind, sort }) {
     const words = containing(q);
     const where = and(
       isNull(jobs.canceledAt),
@@ -32,10 +37,10 @@ export const listJobs = query({
       .from(jobs)
       .innerJoin(sites, onSite)
       .where(where)
-      .orderBy(desc(jobs.number))
-      .limit(PAGE_SIZE)
-      .offset(offsetOf(page));
+      .orderBy(...orderBy(sort, SORTS, [desc(jobs.number)]))
+      .limit(pageSize)
+      .offset(offsetOf(page, pageSize));
     const [all] = await tx.select({ total: count() }).from(jobs).innerJoin(sites, onSite).where(where);
-    return { rows, total: all?.total ?? 0, page, pageSize: PAGE_SIZE };
+    return { rows, total: all?.total ?? 0, page, pageSize };
   },
 });
