@@ -62,7 +62,7 @@ function List({ visits, none, more, heading }: ListProps) {
     <ol className="grid gap-3">
       {visits.map((visit) => (
         <li key={visit.id}>
-          <FieldVisitCard visit={visit} heading={heading} />
+          <FieldVisitCard visit={visit} heading={heading} showDay={heading === "h3"} />
         </li>
       ))}
     </ol>

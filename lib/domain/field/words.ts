@@ -1,5 +1,9 @@
+import type { JobKind } from "@/lib/domain/jobs/words";
+
 /** Every word of the technician's part stands in a message file, so that another language is another file. */
 export const FIELD_WORDS_EN = {
+  /** How dates are written, as a BCP 47 tag. */
+  language: "en-US",
   today: "Today",
   later: "The days after",
   nothingToday: "No visit today",
@@ -14,4 +18,10 @@ export const FIELD_WORDS_EN = {
   account: "Account",
   skip: "To the content",
   main: "Main",
+  jobKinds: {
+    test: "Test",
+    repair: "Repair",
+    service_call: "Service call",
+    acceptance: "Acceptance",
+  } satisfies Record<JobKind, string>,
 } as const;

@@ -1,7 +1,9 @@
 import type { Metadata } from "next";
+import { may } from "@/app/frame";
 import { PageHeader, Section } from "@/components/layout/page-header";
 import { SiteForm } from "@/components/sites/site-form";
 import { SiteSummary } from "@/components/sites/site-summary";
+import { paths } from "@/lib/domain/shared/paths";
 import { zonesOfCountry } from "@/lib/domain/shared/zone";
 import { getSite } from "@/lib/services/sites/get-site";
 import { read } from "@/lib/web/page";
@@ -13,11 +15,17 @@ export default async function SitePage({ params }: PageProps<"/sites/[siteId]">)
   const site = await read(getSite, await params);
   return (
     <>
-      <PageHeader title={site.name} note={`${site.street}, ${site.city}, ${site.state} ${site.postalCode}`} />
+      <PageHeader
+        trail={[{ href: paths.sites, label: "Sites" }]}
+        title={site.name}
+        note={`${site.street}, ${site.city}, ${site.state} ${site.postalCode}`}
+      />
       <SiteSummary site={site} />
-      <Section title="Change">
-        <SiteForm action={updateSiteAction} zones={zonesOfCountry("US")} zone={site.zone} site={site} />
-      </Section>
+      {(await may("site:write")) && (
+        <Section title="Change">
+          <SiteForm action={updateSiteAction} zones={zonesOfCountry("US")} zone={site.zone} site={site} />
+        </Section>
+      )}
     </>
   );
 }
