@@ -36,7 +36,11 @@ export function PasswordForm({ action, next, demo }: { action: FormAction; next:
           <ul className="grid grid-cols-[minmax(0,1fr)] gap-1">
             {demo.map((account) => (
               <li key={account.role}>
-                <Button className="h-auto w-full flex-wrap justify-between" size="small" onClick={() => fill(account)}>
+                <Button
+                  className="w-full justify-between max-sm:flex-col max-sm:items-start max-sm:gap-0"
+                  size="small"
+                  onClick={() => fill(account)}
+                >
                   <span>{ROLE_WORDS[account.role]}</span>
                   <span className="figures min-w-0 font-normal break-all">{account.email}</span>
                 </Button>
@@ -66,7 +70,7 @@ export function ForgotForm({ action }: { action: FormAction }) {
   return (
     <Form action={action} className="grid gap-4">
       <TextField label="E-mail address" name="email" type="email" autoComplete="email" />
-      <SubmitButton>Send me a letter</SubmitButton>
+      <SubmitButton size="thumb">Send me a letter</SubmitButton>
     </Form>
   );
 }

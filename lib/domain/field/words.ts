@@ -11,6 +11,8 @@ export const FIELD_WORDS_EN = {
   nothingLater: "Nothing planned in the next days",
   loading: "Looking for your visits…",
   failed: "Your visits could not be fetched",
+  trouble: "Something went wrong",
+  troubleNext: "What you saved before is safe. Try again; if it stays like this, call the office.",
   tryAgain: "Try again",
   access: "Getting in",
   with: "With",

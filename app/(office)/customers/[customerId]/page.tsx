@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { cache } from "react";
 import { may } from "@/app/frame";
 import { ContactForm, CustomerForm } from "@/components/customers/customer-form";
 import { RowAction } from "@/components/form/row-action";
@@ -11,10 +12,17 @@ import { getCustomer } from "@/lib/services/customers/get-customer";
 import { read } from "@/lib/web/page";
 import { addContactAction, endContactAction, inviteContactAction, updateCustomerAction } from "../actions";
 
-export const metadata: Metadata = { title: "Customer" };
+/** Asked once for the title and the page. */
+const customerOf = cache((customerId: string) => read(getCustomer, { customerId }));
 
-export default async function CustomerPage({ params }: PageProps<"/customers/[customerId]">) {
-  const customer = await read(getCustomer, await params);
+type Props = PageProps<"/customers/[customerId]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: (await customerOf((await params).customerId)).name };
+}
+
+export default async function CustomerPage({ params }: Props) {
+  const customer = await customerOf((await params).customerId);
   const mayWrite = await may("customer:write");
   const mayInvite = await may("person:write");
   return (

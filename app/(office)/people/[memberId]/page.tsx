@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { cache } from "react";
 import { may } from "@/app/frame";
 import { RowAction } from "@/components/form/row-action";
 import { Facts, PageHeader, Section } from "@/components/layout/page-header";
@@ -18,10 +19,17 @@ import {
   restoreMembershipAction,
 } from "../actions";
 
-export const metadata: Metadata = { title: "Person" };
+/** Asked once for the title and the page. */
+const personOf = cache((memberId: string) => read(getPerson, { memberId }));
 
-export default async function PersonPage({ params }: PageProps<"/people/[memberId]">) {
-  const person = await read(getPerson, await params);
+type Props = PageProps<"/people/[memberId]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: (await personOf((await params).memberId)).name };
+}
+
+export default async function PersonPage({ params }: Props) {
+  const person = await personOf((await params).memberId);
   const { details } = person;
   const mayWrite = await may("person:write");
   const own = { name: "memberId", value: person.id };

@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { cache } from "react";
 import { may } from "@/app/frame";
 import { PageHeader, Section } from "@/components/layout/page-header";
 import { SiteForm } from "@/components/sites/site-form";
@@ -9,10 +10,17 @@ import { getSite } from "@/lib/services/sites/get-site";
 import { read } from "@/lib/web/page";
 import { updateSiteAction } from "../actions";
 
-export const metadata: Metadata = { title: "Site" };
+/** Asked once for the title and the page. */
+const siteOf = cache((siteId: string) => read(getSite, { siteId }));
 
-export default async function SitePage({ params }: PageProps<"/sites/[siteId]">) {
-  const site = await read(getSite, await params);
+type Props = PageProps<"/sites/[siteId]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: (await siteOf((await params).siteId)).name };
+}
+
+export default async function SitePage({ params }: Props) {
+  const site = await siteOf((await params).siteId);
   return (
     <>
       <PageHeader
