@@ -14,7 +14,7 @@ export function ChangePasswordForm({ action }: { action: FormAction }) {
         autoComplete="new-password"
         hint="At least 12 characters. You are signed out everywhere and sign in with it."
       />
-      <SubmitButton>Change password</SubmitButton>
+      <SubmitButton size="thumb">Change password</SubmitButton>
     </Form>
   );
 }

@@ -28,17 +28,21 @@ export function PasswordForm({ action, next, demo }: { action: FormAction; next:
         <SubmitButton size="thumb">Sign in</SubmitButton>
       </Form>
       {demo.length > 0 && (
-        <Card aria-label="Demo accounts" className="grid gap-2">
+        <Card aria-label="Demo accounts" className="grid grid-cols-[minmax(0,1fr)] gap-2">
           <h2 className="font-semibold">Demo accounts</h2>
           <p className="text-sm text-muted">
             All with the password <span className="figures">{demo[0]?.password}</span>. Choose one to fill the form.
           </p>
-          <ul className="grid gap-1">
+          <ul className="grid grid-cols-[minmax(0,1fr)] gap-1">
             {demo.map((account) => (
               <li key={account.role}>
-                <Button className="w-full justify-between" size="small" onClick={() => fill(account)}>
+                <Button
+                  className="w-full justify-between max-sm:flex-col max-sm:items-start max-sm:gap-0"
+                  size="small"
+                  onClick={() => fill(account)}
+                >
                   <span>{ROLE_WORDS[account.role]}</span>
-                  <span className="figures font-normal">{account.email}</span>
+                  <span className="figures min-w-0 font-normal break-all">{account.email}</span>
                 </Button>
               </li>
             ))}
@@ -66,7 +70,7 @@ export function ForgotForm({ action }: { action: FormAction }) {
   return (
     <Form action={action} className="grid gap-4">
       <TextField label="E-mail address" name="email" type="email" autoComplete="email" />
-      <SubmitButton>Send me a letter</SubmitButton>
+      <SubmitButton size="thumb">Send me a letter</SubmitButton>
     </Form>
   );
 }

@@ -1,7 +1,8 @@
 "use client";
 
-import { TextareaField, TextField } from "@/components/form/field";
+import { SelectField, TextareaField, TextField } from "@/components/form/field";
 import { Form, type FormAction, SubmitButton } from "@/components/form/form";
+import { US_STATES } from "@/lib/domain/shared/inputs";
 
 type Customer = {
   id: string;
@@ -23,7 +24,12 @@ export function CustomerForm({ action, customer }: { action: FormAction; custome
       <TextField label="Billing street" name="billingStreet" defaultValue={customer?.billingStreet} />
       <div className="grid gap-4 sm:grid-cols-[1fr_6rem_8rem]">
         <TextField label="City" name="billingCity" defaultValue={customer?.billingCity} />
-        <TextField label="State" name="billingState" maxLength={2} defaultValue={customer?.billingState} />
+        <SelectField label="State" name="billingState" defaultValue={customer?.billingState ?? ""}>
+          <option value="" />
+          {US_STATES.map((state) => (
+            <option key={state}>{state}</option>
+          ))}
+        </SelectField>
         <TextField label="Postal code" name="billingPostalCode" defaultValue={customer?.billingPostalCode} />
       </div>
       <TextareaField

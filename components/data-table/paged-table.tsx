@@ -2,6 +2,7 @@ import { Search as SearchGlyph } from "lucide-react";
 import Form from "next/form";
 import { useId } from "react";
 import { Button } from "@/components/ui/button";
+import { cn } from "@/components/ui/cn";
 import { Input, Select } from "@/components/ui/input";
 import { Pagination } from "@/components/ui/pagination";
 import { hrefWith, type Search } from "./address";
@@ -20,9 +21,9 @@ type SearchBarProps = {
 export function SearchBar({ path, q, label, sort, children }: SearchBarProps) {
   const id = useId();
   return (
-    <Form action={path} role="search" className="flex flex-wrap items-end gap-2" data-print="off">
+    <Form action={path} role="search" className="flex flex-wrap items-end gap-2 max-sm:w-full" data-print="off">
       {typeof sort === "string" && <input type="hidden" name="sort" value={sort} />}
-      <div className="grid gap-1 max-sm:w-full">
+      <div className={cn("grid gap-1", children ? "max-sm:w-full" : "max-sm:flex-1")}>
         <label htmlFor={id} className="text-sm text-muted">
           {label}
         </label>

@@ -2,9 +2,10 @@
 
 import { useQuery } from "@tanstack/react-query";
 import Link from "next/link";
-import { Mark } from "@/components/layout/mark";
+import { FieldShell } from "@/components/layout/field-shell";
 import { Button } from "@/components/ui/button";
 import { Callout, EmptyState } from "@/components/ui/card";
+import { PageSkeleton } from "@/components/ui/skeleton";
 import { FIELD_WORDS_EN as WORDS } from "@/lib/domain/field/words";
 import { paths } from "@/lib/domain/shared/paths";
 import { type FieldVisit, fieldDayQuery } from "@/lib/queries/field";
@@ -15,17 +16,17 @@ export function FieldToday() {
   const standing = data?.visits.filter((visit) => !visit.canceledAt) ?? [];
   const isToday = (visit: FieldVisit) => visit.startsLocal.startsWith(data?.today ?? "");
   return (
-    <main className="mx-auto grid max-w-xl gap-4 px-4 py-4">
-      <header className="flex items-center justify-between">
-        <p className="flex items-center gap-2 font-bold">
-          <Mark className="size-8" />
-          {data?.company.name ?? "Coastdown"}
-        </p>
-        <Link href={paths.account} className="flex min-h-12 items-center px-3 underline">
+    <FieldShell
+      title={WORDS.today}
+      corner={
+        <Link href={paths.account} className="flex min-h-12 items-center px-3 font-semibold underline">
           {WORDS.account}
         </Link>
-      </header>
-      <h1 className="text-2xl font-bold">{WORDS.today}</h1>
+      }
+      items={[]}
+      words={{ skip: WORDS.skip, main: WORDS.main }}
+    >
+      {data && <p className="text-muted">{data.company.name}</p>}
       {error && (
         <Callout tone="alert">
           <p>
@@ -36,25 +37,32 @@ export function FieldToday() {
           </Button>
         </Callout>
       )}
-      {!data && !error && <p>{WORDS.loading}</p>}
+      {!data && !error && <PageSkeleton label={WORDS.loading} />}
       {data && (
         <>
-          <List visits={standing.filter(isToday)} none={WORDS.nothingToday} more={WORDS.nothingTodayNext} />
+          <List
+            visits={standing.filter(isToday)}
+            none={WORDS.nothingToday}
+            more={WORDS.nothingTodayNext}
+            heading="h2"
+          />
           <h2 className="text-lg font-bold">{WORDS.later}</h2>
-          <List visits={standing.filter((visit) => !isToday(visit))} none={WORDS.nothingLater} />
+          <List visits={standing.filter((visit) => !isToday(visit))} none={WORDS.nothingLater} heading="h3" />
         </>
       )}
-    </main>
+    </FieldShell>
   );
 }
 
-function List({ visits, none, more }: { visits: FieldVisit[]; none: string; more?: string }) {
+type ListProps = { visits: FieldVisit[]; none: string; more?: string; heading: "h2" | "h3" };
+
+function List({ visits, none, more, heading }: ListProps) {
   if (visits.length === 0) return <EmptyState title={none}>{more}</EmptyState>;
   return (
     <ol className="grid gap-3">
       {visits.map((visit) => (
         <li key={visit.id}>
-          <FieldVisitCard visit={visit} />
+          <FieldVisitCard visit={visit} heading={heading} showDay={heading === "h3"} />
         </li>
       ))}
     </ol>

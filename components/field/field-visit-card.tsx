@@ -1,22 +1,24 @@
 import { ShowCode } from "@/components/form/show-code";
 import { Card } from "@/components/ui/card";
 import { FIELD_WORDS_EN as WORDS } from "@/lib/domain/field/words";
-import { JOB_KIND_WORDS } from "@/lib/domain/jobs/words";
 import type { FieldVisit } from "@/lib/queries/field";
 
-export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
+type Props = { visit: FieldVisit; heading: "h2" | "h3"; showDay: boolean };
+
+export function FieldVisitCard({ visit, heading: Heading, showDay }: Props) {
   const { site, job, crew, accessNote, secrets, contacts } = visit;
   return (
     <Card className="grid gap-2 p-4">
       <p className="figures text-lg font-bold">
-        {visit.startsLocal.replace("T", " ")}–{visit.endsLocal.slice(11)}
+        {showDay && <span className="block font-sans">{dayOf(visit.startsLocal)}</span>}
+        {visit.startsLocal.slice(11)}–{visit.endsLocal.slice(11)}
       </p>
-      <h3 className="text-lg font-bold">{site.name}</h3>
+      <Heading className="text-lg font-bold">{site.name}</Heading>
       <p>
         {site.street}, {site.city}
       </p>
       <p>
-        {JOB_KIND_WORDS[job.kind]} <span className="figures">{job.number}</span>: {job.title}
+        {WORDS.jobKinds[job.kind]} <span className="figures">{job.number}</span>: {job.title}
       </p>
       {crew.length > 1 && (
         <p>
@@ -53,3 +55,9 @@ export function FieldVisitCard({ visit }: { visit: FieldVisit }) {
     </Card>
   );
 }
+
+/** The local date has no zone of its own any more; UTC on both sides keeps it. */
+const dayOf = (local: string): string =>
+  new Intl.DateTimeFormat(WORDS.language, { weekday: "long", month: "long", day: "numeric", timeZone: "UTC" }).format(
+    new Date(`${local.slice(0, 10)}T00:00Z`),
+  );

@@ -4,6 +4,7 @@ import { startTransition, useActionState, useEffect, useRef } from "react";
 import { useFormStatus } from "react-dom";
 import { toast } from "sonner";
 import { Button } from "@/components/ui/button";
+import { cn } from "@/components/ui/cn";
 import type { FormState } from "@/lib/domain/shared/form-state";
 import { ErrorSummary } from "./error-summary";
 import { FormStateContext } from "./form-context";
@@ -58,7 +59,9 @@ export function Form({ action, say = "here", onDone, children, ...props }: FormP
   );
 }
 
-export function SubmitButton(props: React.ComponentProps<typeof Button>) {
+/** As wide as its words at a desk, as the form on a phone and where it is the page's one step. */
+export function SubmitButton({ className, ...props }: React.ComponentProps<typeof Button>) {
   const { pending } = useFormStatus();
-  return <Button type="submit" variant="primary" pending={pending} {...props} />;
+  const width = props.size !== "thumb" && "sm:justify-self-start";
+  return <Button type="submit" variant="primary" pending={pending} className={cn(width, className)} {...props} />;
 }

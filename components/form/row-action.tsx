@@ -20,7 +20,7 @@ export function RowAction({ action, name, value, button, danger, confirm }: RowP
   const field = useRef<HTMLInputElement>(null);
   const variant = danger ? "danger" : "quiet";
   return (
-    <Form action={action} className="relative inline-grid gap-2">
+    <Form action={action} className="relative inline-grid gap-2 justify-self-start">
       <input ref={field} type="hidden" name={name} value={value} />
       {confirm ? (
         <ConfirmDialog

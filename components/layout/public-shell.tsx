@@ -8,7 +8,7 @@ export function PublicShell({ children }: { children: React.ReactNode }) {
       <main
         id="content"
         tabIndex={-1}
-        className="mx-auto grid min-h-dvh w-full max-w-md content-center gap-6 px-4 py-10 outline-none"
+        className="mx-auto grid min-h-dvh w-full max-w-md grid-cols-[minmax(0,1fr)] content-center gap-6 px-4 py-10 outline-none"
       >
         <p className="flex items-center gap-2.5 text-xl font-bold">
           <Mark className="size-9" />

@@ -7,11 +7,19 @@ import { PublicShell } from "./public-shell";
 const digestOf = (error: unknown): string | undefined =>
   error instanceof Error && "digest" in error && typeof error.digest === "string" ? error.digest : undefined;
 
+type Props = { error: unknown; retry: () => void };
+
+export const TroublePage = (props: Props) => (
+  <PublicShell>
+    <Trouble {...props} />
+  </PublicShell>
+);
+
 /** Our failure, not theirs: what is safe, what to do, and a number that finds it in the log. */
-export function TroublePage({ error, retry }: { error: unknown; retry: () => void }) {
+export function Trouble({ error, retry }: Props) {
   const digest = digestOf(error);
   return (
-    <PublicShell>
+    <div className="grid gap-6">
       <div className="grid gap-3" role="alert">
         <h1 className="text-2xl font-bold">Something went wrong on our side</h1>
         <p>What you saved before is safe. Try again; if it happens a second time, tell us{digest && " this number"}.</p>
@@ -31,6 +39,6 @@ export function TroublePage({ error, retry }: { error: unknown; retry: () => voi
           <a href="/">To your first screen</a>
         </Button>
       </div>
-    </PublicShell>
+    </div>
   );
 }

@@ -32,7 +32,7 @@ export function Attention({ licenses, failedDeliveries, visitsNextSevenDays }: P
           <ul className="grid gap-2">
             {licenses.map((license) => (
               <li key={license.memberId + license.expiresOn}>
-                <Card className="flex flex-wrap items-center justify-between gap-2 p-3 sm:p-3">
+                <Card className="grid items-center justify-items-start gap-x-4 gap-y-2 p-3 sm:grid-cols-[12rem_1fr_auto] sm:p-3">
                   <Link href={paths.person(license.memberId)} className="font-semibold hover:underline">
                     {license.name}
                   </Link>

@@ -50,7 +50,9 @@ export function LicenseForm({ action, memberId }: { action: FormAction; memberId
       <TextField label="Number" name="number" />
       <TextField label="Jurisdiction" name="jurisdiction" />
       <TextField label="Last day" name="expiresOn" type="date" />
-      <SubmitButton variant="quiet">Record license</SubmitButton>
+      <SubmitButton variant="quiet" className="sm:col-span-2">
+        Record license
+      </SubmitButton>
     </Form>
   );
 }

@@ -15,8 +15,8 @@ const button = cva(
         plain: "border-transparent bg-transparent text-text hover:bg-sunken",
       },
       size: {
-        normal: "min-h-10 px-4 py-1.5",
-        small: "min-h-8 px-3 py-0.5 text-sm",
+        normal: "min-h-10 px-4 py-1.5 pointer-coarse:min-h-12",
+        small: "min-h-8 px-3 py-0.5 text-sm pointer-coarse:min-h-10",
         thumb: "min-h-12 px-5 py-2.5 text-base",
       },
       square: { true: "aspect-square p-0", false: "" },

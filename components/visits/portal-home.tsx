@@ -27,7 +27,7 @@ export function PortalHome({ company, sites, visits, now, answer }: Props) {
   const settled = coming.filter((visit) => !waiting.includes(visit));
   return (
     <>
-      <PageHeader title="Your buildings" note={`${company.name}, ${company.phone}`} />
+      <PageHeader title="Your buildings" note={company.name} />
       {waiting.length > 0 && (
         <Section title="Waiting for your answer" note="We come once you have said that it can take place.">
           <VisitCaution />

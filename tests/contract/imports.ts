@@ -7,7 +7,7 @@ type Rule = { folder: string; own: string[]; packages?: string[]; never?: string
 /** From upstream to downstream; inside a layer an area imports only from the left. */
 const AREAS = (
   "company people customers sites systems sequences circuits agreements windows jobs offnormal deficiencies visits " +
-  "planning proposals invoices payments records messages audit find"
+  "planning field proposals invoices payments records messages audit find"
 ).split(" ");
 
 const SERVER_ONLY = ["drizzle-orm", "postgres", "nodemailer", "pino", "@node-rs/argon2", "node:"];

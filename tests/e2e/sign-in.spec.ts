@@ -39,3 +39,24 @@ test("a technician does not get into the office, nor a customer", async ({ page 
   await page.goto("/people");
   await expect(page.getByText("Marisol")).toHaveCount(0);
 });
+
+test("there is no way in beside the form, whose attempts are counted", async ({ request }) => {
+  for (const path of ["callback/password", "signin/password", "signin/email", "csrf", "session"]) {
+    expect((await request.post(`/api/auth/${path}`, { form: { email: addressOfRole("owner") } })).status()).toBe(404);
+  }
+});
+
+test("a password is not guessed: after ten attempts the account stays shut, right password or not", async ({
+  page,
+}) => {
+  const email = `${crypto.randomUUID()}@stillwater.example`;
+  await page.goto("/sign-in");
+  for (let attempt = 1; attempt <= 11; attempt++) {
+    await page.getByLabel("E-mail address").first().fill(email);
+    await page.getByLabel("Password").fill(`guess number ${attempt}`);
+    const answered = page.waitForResponse((response) => response.request().method() === "POST");
+    await page.getByRole("button", { name: "Sign in", exact: true }).click();
+    await answered;
+  }
+  await expect(page.getByText(/Too many attempts/).first()).toBeVisible();
+});

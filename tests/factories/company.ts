@@ -1,10 +1,9 @@
 import { randomUUID } from "node:crypto";
-import { and, desc, eq } from "drizzle-orm";
+import { eq } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
 import { database } from "@/db/client";
 import { asActor } from "@/db/door";
 import { passwords, sessions, users } from "@/db/schema/identity";
-import { messageSecrets, messages } from "@/db/schema/messages";
 import { members } from "@/db/schema/people";
 import type { Actor } from "@/lib/auth/actor";
 import { hashPassword } from "@/lib/auth/password";
@@ -110,23 +109,4 @@ export async function hire(company: Company, role: StaffRole): Promise<Person> {
   const email = uniqueAddress();
   const { memberId } = await inviteStaff(company.owner.context, { name: unique(role), email, role });
   return person(company.companyId, memberId, email);
-}
-
-/** The token in the newest letter of a kind to an address. */
-export async function tokenFor(companyId: string, email: string, template: string): Promise<string> {
-  const [letter] = await asActor(
-    worker(companyId),
-    (tx) =>
-      tx
-        .select({ url: messageSecrets.url })
-        .from(messages)
-        .innerJoin(messageSecrets, eq(messageSecrets.messageId, messages.id))
-        .where(and(eq(messages.toAddress, email), eq(messages.template, template)))
-        .orderBy(desc(messages.createdAt), desc(messages.id))
-        .limit(1),
-    "read",
-  );
-  const token = letter?.url.split("/").at(-1);
-  if (!token) throw new Error(`no ${template} letter to ${email}`);
-  return token;
 }

@@ -5,6 +5,7 @@ import { DataTable } from "@/components/data-table/data-table";
 import { SearchBar } from "@/components/data-table/paged-table";
 import { PageHeader } from "@/components/layout/page-header";
 import { EmptyState } from "@/components/ui/card";
+import { TextLink } from "@/components/ui/text-link";
 import { paths } from "@/lib/domain/shared/paths";
 import { toLocalTime } from "@/lib/domain/shared/zone";
 import { listAudit } from "@/lib/services/audit/list-audit";
@@ -38,9 +39,24 @@ export default async function AuditPage({ searchParams }: PageProps<"/audit">) {
           },
           { key: "who", header: "Who", cell: ({ entry, person }) => person ?? entry.actorKind },
           { key: "what", header: "What", figures: true, cell: ({ entry }) => entry.command },
-          { key: "of", header: "Of", cell: ({ entry }) => entry.entity },
+          {
+            key: "of",
+            header: "Of",
+            cell: ({ entry }) => <Entity {...entry} />,
+          },
         ]}
       />
     </>
   );
+}
+
+const PAGE_OF: Record<string, (id: string) => string> = {
+  customer: paths.customer,
+  person: paths.person,
+  site: paths.site,
+};
+
+function Entity({ entity, entityId }: { entity: string; entityId: string | null }) {
+  const page = PAGE_OF[entity];
+  return page && entityId ? <TextLink href={page(entityId)}>{entity}</TextLink> : entity;
 }

@@ -35,8 +35,9 @@ export const paths = {
   deliveries: "/settings/deliveries",
   field: "/field",
   /** The same list as a file, with the filters and order of the address. */
-  listFile: (list: "sites" | "customers" | "people" | "audit" | "agreements" | "due-list" | "jobs") =>
-    `/${list}/export.csv`,
+  listFile: (
+    list: "sites" | "customers" | "people" | "audit" | "agreements" | "due-list" | "jobs" | "settings/deliveries",
+  ) => `/${list}/export.csv`,
   portal: "/portal",
   portalSite: (id: string) => `/portal/sites/${id}`,
 } as const;

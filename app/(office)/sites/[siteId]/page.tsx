@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import Link from "next/link";
+import { cache } from "react";
 import { frame } from "@/app/frame";
 import { PageHeader } from "@/components/layout/page-header";
 import { AccessSection } from "@/components/sites/access-section";
@@ -18,13 +19,18 @@ import { getSiteFacts } from "@/lib/services/sites/get-site-facts";
 import { read } from "@/lib/web/page";
 import * as actions from "../actions";
 
-export const metadata: Metadata = { title: "Site" };
+/** Asked once for the title and the page. */
+const siteOf = cache((siteId: string) => read(getSite, { siteId }));
+
+export async function generateMetadata({ params }: PageProps<"/sites/[siteId]">): Promise<Metadata> {
+  return { title: (await siteOf((await params).siteId)).name };
+}
 
 export default async function SitePage({ params }: PageProps<"/sites/[siteId]">) {
   const { siteId } = await params;
   const { role } = await frame();
   const [site, facts, customers] = [
-    await read(getSite, { siteId }),
+    await siteOf(siteId),
     await read(getSiteFacts, { siteId }),
     await read(listCustomerChoices),
   ];

@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { only } from "@/app/frame";
 import { PageHeader } from "@/components/layout/page-header";
 import { SiteForm } from "@/components/sites/site-form";
 import { zonesOfCountry } from "@/lib/domain/shared/zone";
@@ -9,6 +10,7 @@ import { createSiteAction } from "../actions";
 export const metadata: Metadata = { title: "New site" };
 
 export default async function NewSitePage() {
+  await only("site:write");
   const { zone } = await read(getCompany);
   return (
     <>

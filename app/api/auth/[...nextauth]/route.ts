@@ -1,3 +1,0 @@
-import { handlers } from "@/lib/auth/auth";
-
-export const { GET, POST } = handlers;

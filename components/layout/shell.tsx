@@ -1,1 +1,0 @@
-export { OfficeShell as Shell } from "./office-shell";
