@@ -9,7 +9,7 @@ import { tabBarLook, tabLook } from "@/components/ui/tabs";
 export function LinkTabs({ label, items }: { label: string; items: readonly { href: string; label: string }[] }) {
   const path = usePathname();
   return (
-    <nav aria-label={label} data-print="off">
+    <nav aria-label={label} data-print="off" className="min-w-0">
       <ul className={tabBarLook}>
         {items.map(({ href, label }) => (
           <li key={href}>

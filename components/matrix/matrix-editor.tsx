@@ -40,7 +40,7 @@ export function MatrixEditor({ systemId, matrix, mayChange }: Props) {
   ]);
   const changes = difference(saved, [...cells.values()], (id) => names.get(id) ?? "unknown");
   return (
-    <div className="grid gap-3">
+    <div className="grid min-w-0 grid-cols-1 gap-3">
       <VersionNote {...{ systemId, version, newest }} />
       {mayChange && <PenBar pen={pen} onChange={setPen} />}
       <MatrixGrid

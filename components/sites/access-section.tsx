@@ -41,7 +41,7 @@ export function AccessSection(props: Props) {
           <Nothing>Nothing is written down about how to get in.</Nothing>
         )}
       </Section>
-      <div className="grid items-start gap-5 lg:grid-cols-2">
+      <div className="grid min-w-0 grid-cols-1 items-start gap-5 lg:grid-cols-2">
         <Keys {...props} />
         {props.mayLook && <Codes {...props} />}
       </div>

@@ -52,7 +52,7 @@ export function WindowsSection(props: Props) {
           </Entries>
         )}
       </Section>
-      <div className="grid items-start gap-5 lg:grid-cols-2">
+      <div className="grid min-w-0 grid-cols-1 items-start gap-5 lg:grid-cols-2">
         <Section title="No-test dates" actions={mayChange && <AddNoTest siteId={siteId} action={actions.addNoTest} />}>
           {noTestDates.length === 0 && <Nothing>None recorded: exams, holidays, events.</Nothing>}
           {noTestDates.length > 0 && (

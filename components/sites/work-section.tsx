@@ -74,7 +74,7 @@ const stateOf = ({ canceledAt, doneOn, targetOn }: Job): string => {
 
 export function WorkSection({ jobs, visits }: { jobs: readonly Job[]; visits: readonly Visit[] }) {
   return (
-    <div className="grid items-start gap-5 lg:grid-cols-2">
+    <div className="grid min-w-0 grid-cols-1 items-start gap-5 lg:grid-cols-2">
       <Section title="Jobs">
         {jobs.length === 0 && <Nothing>No job yet.</Nothing>}
         {jobs.length > 0 && (

@@ -58,7 +58,7 @@ export default async function SitePage({ params }: PageProps<"/sites/[siteId]">)
         }
       />
       <SiteNav />
-      <div className="grid items-start gap-5 lg:grid-cols-2">
+      <div className="grid min-w-0 grid-cols-1 items-start gap-5 lg:grid-cols-2">
         <SitePart id="place">
           <PlaceSection site={site} />
         </SitePart>
@@ -111,7 +111,7 @@ export default async function SitePage({ params }: PageProps<"/sites/[siteId]">)
           }}
         />
       </SitePart>
-      <div className="grid items-start gap-5 lg:grid-cols-2">
+      <div className="grid min-w-0 grid-cols-1 items-start gap-5 lg:grid-cols-2">
         <SitePart id="systems">
           <SystemsSection {...shared} systems={facts.systems} />
         </SitePart>
