@@ -59,15 +59,7 @@ export function SiteField({ chosen, onChoose, offered = [], autoFocus }: Props) 
             </div>
           ) : (
             <Command shouldFilter={false} label="Site">
-              <Command.Input
-                asChild
-                value={typed}
-                onValueChange={(value) => {
-                  setTyped(value);
-                  // The focus may have come before the script did.
-                  setOpen(true);
-                }}
-              >
+              <Command.Input asChild value={typed} onValueChange={setTyped}>
                 <Input
                   {...control}
                   ref={box}

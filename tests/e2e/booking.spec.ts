@@ -198,7 +198,7 @@ async function calendarEntry(letterId: string) {
   const mail = await simpleParser(await rawLetter(letterId));
   const file = mail.attachments.find(({ filename }) => filename === "visit.ics");
   const calendar = new ICAL.Component(ICAL.parse(file?.content.toString("utf8") ?? ""));
-  const event = new ICAL.Event(calendar.getFirstSubcomponent("vevent"));
+  const event = new ICAL.Event(calendar.getFirstSubcomponent("vevent") ?? undefined);
   return {
     method: calendar.getFirstPropertyValue("method"),
     uid: event.uid,
