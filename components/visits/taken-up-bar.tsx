@@ -64,6 +64,7 @@ export function TakenUpBar({ taken, places, problem, technicians, onChange, onPu
         ))}
         <Button onClick={onPutBack}>Put back (Esc)</Button>
       </div>
+      {!places && !problem && <p className="text-muted">Looking where it can go…</p>}
       {problem && <p className="font-semibold text-alert">{problem}</p>}
       {places && places.functions.length > 0 && (
         <p className="text-sm text-muted">
