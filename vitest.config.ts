@@ -14,6 +14,8 @@ export default defineConfig({
     setupFiles: ["tests/setup/worker.ts"],
     pool: "forks",
     maxWorkers: 2,
-    testTimeout: 30_000,
+    // Ends what hangs; a small busy machine may take its time.
+    testTimeout: 120_000,
+    hookTimeout: 120_000,
   },
 });

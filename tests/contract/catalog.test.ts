@@ -97,3 +97,11 @@ test("without an actor every tenant table raises, and none answers with an empty
   );
   expect(new Set(answers)).toEqual(new Set(["raised"]));
 });
+
+test("whichever part of a policy PostgreSQL asks first: without an actor it raises", async () => {
+  const parts = ["company_id", "role", "is_owner", "is_office", "is_technician", "is_worker", "is_operator", "is_link"];
+  for (const part of parts) {
+    const asked = database().execute(`select app.${part}()`);
+    await expect(asked, part).rejects.toMatchObject({ cause: { code: "CD401" } });
+  }
+});

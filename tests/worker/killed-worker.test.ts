@@ -30,4 +30,4 @@ test("a worker killed in the middle of a job loses nothing and doubles nothing",
   await until(async () => Boolean((await delivery())?.doneAt));
   expect(mail.to(email)).toEqual([expect.objectContaining({ messageId: (await delivery())?.messageId })]);
   await second.end("SIGTERM");
-}, 60_000);
+});
