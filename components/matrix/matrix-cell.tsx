@@ -1,7 +1,8 @@
 // biome-ignore-all lint/a11y/useSemanticElements: most rows are not drawn, which a table element cannot tell
 import { Check, Minus, X } from "lucide-react";
+import { memo } from "react";
 import { cn } from "@/components/ui/cn";
-import { type MatrixCell as Cell, cellKey } from "@/lib/domain/sequences/matrix";
+import type { MatrixCell as Cell } from "@/lib/domain/sequences/matrix";
 import { EXPECTATION_SOURCE_WORDS, SIGNAL_WORDS } from "@/lib/domain/systems/words";
 import { type PairProof, SIGNAL_MARKS, SOURCE_LETTERS } from "./matrix-facts";
 
@@ -12,10 +13,17 @@ type Props = {
   group: string;
   cells: readonly Cell[];
   proof: PairProof | undefined;
-  unsaved: ReadonlySet<string>;
+  /** Signals of the cells that are not saved yet, as one word. */
+  unsaved: string;
   active: boolean;
   editable: boolean;
 };
+
+/** A press draws one cell anew, not a thousand. */
+const same = ({ cells: a, ...before }: Props, { cells: b, ...after }: Props): boolean =>
+  a.length === b.length &&
+  a.every((cell, i) => cell === b[i]) &&
+  (Object.keys(after) as (keyof typeof after)[]).every((name) => before[name] === after[name]);
 
 const proofWords = (proof: PairProof | undefined) =>
   proof ? `${proof.outcome === "failed" ? "failed" : "proven"} ${proof.on}` : "never proven";
@@ -27,7 +35,7 @@ function wordsOf({ input, group, cells, proof, unsaved }: Props): string {
       SIGNAL_WORDS[cell.signal],
       EXPECTATION_SOURCE_WORDS[cell.source].toLowerCase(),
       cell.delaySeconds > 0 && `after ${cell.delaySeconds} s`,
-      unsaved.has(cellKey(cell)) && "not saved",
+      unsaved.includes(cell.signal) && "not saved",
     ]
       .filter(Boolean)
       .join(", "),
@@ -42,7 +50,7 @@ const LOOKS = {
 } as const;
 
 /** Where an input meets a group: a letter for each expectation's source, and a glyph for its proof. */
-export function MatrixCell(props: Props) {
+export const MatrixCell = memo(function MatrixCell(props: Props) {
   const { row, column, cells, proof, unsaved, active, editable } = props;
   const words = wordsOf(props);
   const { Glyph, look } = LOOKS[proof?.outcome ?? "never"];
@@ -57,7 +65,7 @@ export function MatrixCell(props: Props) {
       className={cn(
         "flex w-24 shrink-0 items-center justify-center gap-1 border-r border-b border-line bg-surface -outline-offset-3",
         editable && "cursor-pointer hover:bg-sunken",
-        cells.some((cell) => unsaved.has(cellKey(cell))) && "bg-soon-soft",
+        unsaved && "bg-soon-soft",
       )}
     >
       {cells.map((cell) => (
@@ -70,4 +78,4 @@ export function MatrixCell(props: Props) {
       {cells.length > 0 && <Glyph aria-hidden className={cn("size-3.5", look)} />}
     </div>
   );
-}
+}, same);

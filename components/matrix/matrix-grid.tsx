@@ -3,7 +3,7 @@
 
 import { defaultRangeExtractor, useVirtualizer } from "@tanstack/react-virtual";
 import { useEffect, useRef } from "react";
-import type { MatrixCell as Cell } from "@/lib/domain/sequences/matrix";
+import { type MatrixCell as Cell, cellKey } from "@/lib/domain/sequences/matrix";
 import type { OutputGroup } from "@/lib/domain/systems/device-list";
 import { MatrixCell } from "./matrix-cell";
 import type { PairProof } from "./matrix-facts";
@@ -113,7 +113,7 @@ export function MatrixGrid({ rows, groups, cells, proofs, unsaved, editable, onP
                   group={group.name}
                   cells={cells.get(placeOf(row.id, group.id)) ?? NONE}
                   proof={proofs.get(placeOf(row.id, group.id))}
-                  unsaved={unsaved}
+                  unsaved={signalsOf(cells.get(placeOf(row.id, group.id)) ?? NONE, unsaved)}
                   active={active.row === index && active.column === i + 1}
                   editable={editable}
                 />
@@ -127,6 +127,12 @@ export function MatrixGrid({ rows, groups, cells, proofs, unsaved, editable, onP
 }
 
 const NONE: Cell[] = [];
+
+const signalsOf = (cells: readonly Cell[], unsaved: ReadonlySet<string>): string =>
+  cells
+    .filter((cell) => unsaved.has(cellKey(cell)))
+    .map(({ signal }) => signal)
+    .join();
 
 function placeUnder(target: EventTarget): number[] {
   const cell = target instanceof Element ? target.closest<HTMLElement>("[data-place]") : null;

@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import { type CellKey, cellKey, type MatrixCell } from "@/lib/domain/sequences/matrix";
 import type { Pen } from "./matrix-facts";
 
@@ -26,8 +26,11 @@ export function useMatrix(saved: readonly MatrixCell[]) {
       return [...all, next];
     });
 
-  const removed = [...first].filter(([key, cell]) => !same(cells.get(key), cell)).map(([, cell]) => cell);
-  const added = [...cells].filter(([key, cell]) => !same(first.get(key), cell)).map(([, cell]) => cell);
+  const unsaved = useMemo(() => {
+    const removed = [...first].filter(([key, cell]) => !same(cells.get(key), cell)).map(([, cell]) => cell);
+    const added = [...cells].filter(([key, cell]) => !same(first.get(key), cell)).map(([, cell]) => cell);
+    return { removed, added, unsaved: new Set([...removed, ...added].map(cellKey)) };
+  }, [first, cells]);
   return {
     cells,
     press,
@@ -35,8 +38,6 @@ export function useMatrix(saved: readonly MatrixCell[]) {
     discard: () => setSteps([first]),
     mayUndo: steps.length > 1,
     /** As saving wants them: a changed cell is removed and added. */
-    removed,
-    added,
-    unsaved: new Set([...removed, ...added].map(cellKey)),
+    ...unsaved,
   };
 }

@@ -12,10 +12,17 @@ const CONTACT = contactAddress("anselcold");
 
 const unlike = (words: string) => `${words} ${Date.now().toString(36)}${Math.floor(Math.random() * 1e6).toString(36)}`;
 
-/** A Tuesday or Thursday some weeks ahead, so that tests seldom meet; the site's window opens on it from five to nine. */
-function someDay(): string {
-  const day = new Date(Date.now() + (15 + Math.floor(Math.random() * 150)) * 86_400_000);
-  while (![2, 4].includes(day.getUTCDay())) day.setUTCDate(day.getUTCDate() + 1);
+const BOOKINGS = ["agreed", "in writing", "keyboard"] as const;
+
+/**
+ * A Tuesday some weeks ahead on which the site's window opens from five to nine: in weeks of its own for each test and
+ * size, so that none meets another's visits.
+ */
+function ownDay(booking: (typeof BOOKINGS)[number], isMobile: boolean): string {
+  const ways = 2 * BOOKINGS.length;
+  const week = 3 + ways * Math.floor(Math.random() * 8) + 2 * BOOKINGS.indexOf(booking) + (isMobile ? 1 : 0);
+  const day = new Date(Date.now() + 7 * week * 86_400_000);
+  day.setUTCDate(day.getUTCDate() + ((2 - day.getUTCDay() + 7) % 7));
   return day.toISOString().slice(0, 10);
 }
 
@@ -70,11 +77,12 @@ const visitOf = async (title: string) => {
 test("a visit is booked where its fans may stop, agreed to by the letter's link, moved and canceled", async ({
   page,
   browser,
+  isMobile,
 }) => {
   test.setTimeout(180_000);
   await signInAs(page, "dispatcher");
   const title = await newShutdownTest(page);
-  const date = someDay();
+  const date = ownDay("agreed", isMobile);
   await page.goto(`/run-sheet?date=${date}`);
   await takeUp(page, title);
   await expect(cell(page, "06:00")).toHaveAttribute("data-place", "free");
@@ -132,10 +140,7 @@ test("a visit is booked where its fans may stop, agreed to by the letter's link,
   await expect(guest.getByRole("link", { name: "360-555-0100" })).toBeVisible();
 
   await page.reload();
-  await page
-    .getByRole("gridcell", { name: /^07:00, Dara/ })
-    .getByRole("button", { name: SITE })
-    .click();
+  await openVisit(page, "07:00");
   await page.getByText("Cancel the visit").first().click();
   await page.getByLabel("Reason").fill("The cold chain cannot wait");
   await page.getByRole("dialog").getByRole("button", { name: "Cancel the visit" }).click();
@@ -145,10 +150,13 @@ test("a visit is booked where its fans may stop, agreed to by the letter's link,
   expect(await visitOf(title)).toMatchObject({ canceled: true, sequence: 2 });
 });
 
-test("outside the window it is refused with the reason, until somebody says in writing why", async ({ page }) => {
+test("outside the window it is refused with the reason, until somebody says in writing why", async ({
+  page,
+  isMobile,
+}) => {
   await signInAs(page, "dispatcher");
   const title = await newShutdownTest(page);
-  await page.goto(`/run-sheet?date=${someDay()}`);
+  await page.goto(`/run-sheet?date=${ownDay("in writing", isMobile)}`);
   await takeUp(page, title);
   await expect(cell(page, "13:00")).toHaveAttribute("data-place", "override");
   await cell(page, "13:00").click();
@@ -171,7 +179,7 @@ test("the keyboard alone suffices: take up, walk, put back, take up again, book"
   test.skip(isMobile, "a phone has no keyboard");
   await signInAs(page, "dispatcher");
   const title = await newShutdownTest(page);
-  await page.goto(`/run-sheet?date=${someDay()}`);
+  await page.goto(`/run-sheet?date=${ownDay("keyboard", isMobile)}`);
   await page.getByRole("searchbox", { name: /words of a job/ }).fill(title);
   await page.keyboard.press("Tab");
   await expect(trayButton(page, title)).toBeFocused();
