@@ -17,7 +17,7 @@ export function PageHeader({ title, note, trail, status, actions }: PageHeaderPr
       <div className="grid min-w-0 gap-1">
         {trail && <Breadcrumb trail={trail} />}
         <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
-          <h1 className="text-2xl leading-tight font-bold text-balance">{title}</h1>
+          <h1 className="text-2xl leading-tight font-bold text-balance wrap-anywhere">{title}</h1>
           {status}
         </div>
         {note && <p className="text-muted">{note}</p>}

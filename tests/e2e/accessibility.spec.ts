@@ -47,6 +47,9 @@ async function findings(page: Page, path: string): Promise<string[]> {
 // Many pages, each examined twice, on a small machine.
 test.slow();
 
+// A color on its way from one theme to the other is neither.
+test.use({ contextOptions: { reducedMotion: "reduce" } });
+
 const walk = async (page: Page, paths: readonly string[]) => {
   const found: string[] = [];
   for (const path of paths) found.push(...(await findings(page, path)));
