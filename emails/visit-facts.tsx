@@ -1,7 +1,7 @@
 import { Section } from "react-email";
 import { FUNCTION_WORDS } from "@/lib/domain/systems/words";
-import type { VisitLetter } from "@/lib/domain/visits/letter";
 import { clockOf } from "@/lib/domain/visits/clock";
+import type { VisitLetter } from "@/lib/domain/visits/letter";
 import { spanWords } from "@/lib/domain/visits/times";
 import { Line, Note } from "./letter";
 import { LOOK } from "./look";
