@@ -100,7 +100,7 @@ function Rows<Row>({ caption, columns, rows, rowKey, path, search }: DataTablePr
                   role="cell"
                   data-label={column.header}
                   className={cn(
-                    "align-top max-sm:grid max-sm:grid-cols-[7rem_minmax(0,1fr)] max-sm:gap-2 max-sm:before:font-sans max-sm:before:text-sm max-sm:before:text-muted max-sm:before:content-[attr(data-label)] max-sm:has-[>span:empty]:hidden sm:px-3 sm:py-2",
+                    "align-top max-sm:grid max-sm:grid-cols-[6rem_minmax(0,1fr)] max-sm:gap-2 max-sm:before:font-sans max-sm:before:text-sm max-sm:before:text-muted max-sm:before:content-[attr(data-label)] max-sm:has-[>span:empty]:hidden sm:px-3 sm:py-2",
                     looks(column),
                   )}
                 >

@@ -1,3 +1,5 @@
+"use client";
+
 import { Printer } from "lucide-react";
 import { Button, IconButton } from "@/components/ui/button";
 import { Kbd } from "@/components/ui/kbd";
