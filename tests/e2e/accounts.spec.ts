@@ -49,7 +49,7 @@ test("an invited person opens the letter, chooses a password and lands on the fi
   await theirs.goto(link);
   await theirs.getByLabel("Password").fill(PASSWORD);
   await theirs.getByRole("button", { name: "Accept" }).click();
-  await expect(theirs.getByRole("alert")).toBeVisible();
+  await expect(theirs.getByRole("main").getByRole("alert")).toBeVisible();
 });
 
 test("ending somebody's access takes effect at that person's next click", async ({ page, browser }) => {
