@@ -28,6 +28,7 @@ export default defineConfig({
   // The machine is small and the whole product runs beside the browsers.
   timeout: 90_000,
   expect: { timeout: 15_000 },
+  retries: 1,
   reporter: [["list"], ["json", { outputFile: process.env.TEST_REPORT ?? "test-results/playwright.json" }]],
   use: {
     ...(process.env.APP_URL && { baseURL: process.env.APP_URL }),
