@@ -7,8 +7,10 @@ import type { Permission } from "@/lib/domain/shared/permissions";
 import { AppError, type FieldErrors } from "@/lib/errors";
 import { translated } from "./database-errors";
 
-export type Context = { actor: Actor; now: Date; requestId?: string };
-export type Inside = { tx: Tx; who: Entered; now: Date };
+/** How far long work is, for whoever waits. */
+type Tell = (at: { step: string; done: number; of: number }) => void;
+export type Context = { actor: Actor; now: Date; requestId?: string; progress?: Tell };
+export type Inside = { tx: Tx; who: Entered; now: Date; progress: Tell };
 
 type AuditWord = { entity: string; entityId: string; before?: unknown; after?: unknown };
 
@@ -42,7 +44,7 @@ export function command<I extends z.ZodType, R>(definition: CommandDefinition<I,
   const { name, needs, input, run } = definition;
   return verb({ verbName: name, needs, kind: "command" }, (context, raw) =>
     enter(context, needs, "write", async ({ tx, who }) => {
-      const { result, audit } = await run({ tx, who, now: context.now }, parse(input, raw));
+      const { result, audit } = await run(insideOf(context, tx, who), parse(input, raw));
       await writeAudit(tx, who, context, name, audit);
       return result;
     }),
@@ -60,9 +62,11 @@ type QueryDefinition<I extends z.ZodType, R> = {
 export function query<I extends z.ZodType, R>(definition: QueryDefinition<I, R>): Verb<R> {
   const { name, needs, input, run } = definition;
   return verb({ verbName: name, needs, kind: "query" }, (context, raw) =>
-    enter(context, needs, "read", ({ tx, who }) => run({ tx, who, now: context.now }, parse(input, raw))),
+    enter(context, needs, "read", ({ tx, who }) => run(insideOf(context, tx, who), parse(input, raw))),
   );
 }
+
+const insideOf = ({ now, progress = () => {} }: Context, tx: Tx, who: Entered): Inside => ({ tx, who, now, progress });
 
 type Facts = Pick<Verb, "verbName" | "needs" | "kind">;
 

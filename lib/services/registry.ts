@@ -22,6 +22,8 @@ import { listCustomers } from "./customers/list-customers";
 import { updateCustomer } from "./customers/update-customer";
 import { find } from "./find/find";
 import { getSiteBrief } from "./find/get-site-brief";
+import { importLists } from "./imports/import-lists";
+import { previewImport } from "./imports/preview-import";
 import { cancelJob } from "./jobs/cancel-job";
 import { createJob } from "./jobs/create-job";
 import { endWait } from "./jobs/end-wait";
@@ -173,6 +175,7 @@ export const COMMANDS: readonly Verb[] = [
   endStationAccount,
   handOverKey,
   lookAtSecret,
+  importLists,
   addSystem,
   changeSystem,
   putBackEntry,
@@ -219,6 +222,7 @@ export const QUERIES: readonly Verb[] = [
   getReasons,
   getVisit,
   getSiteFacts,
+  previewImport,
   getMatrix,
   getScript,
   listVersions,

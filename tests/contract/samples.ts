@@ -181,8 +181,10 @@ export const SAMPLES: Record<string, Sample> = {
   "system.add": (w) => ({ siteId: w.site.siteId, key: unique("S"), name: "Main panel" }),
   "system.change": async (w) => ({ systemId: await bareSystem(w), key: unique("S"), name: "Main panel, tower" }),
   "system.get": async (w) => ({ systemId: await bareSystem(w) }),
+  "system.import": async (w) => ({ systemId: await bareSystem(w), files: [deviceFile] }),
   "system.list-points": async (w) => ({ systemId: (await smallSystem(w)).systemId, proof: "never", sort: "proven" }),
   "system.outputs": async (w) => ({ systemId: (await smallSystem(w)).systemId }),
+  "system.preview-import": async (w) => ({ systemId: await bareSystem(w), files: [deviceFile] }),
   "system.put-back": async (w) => {
     const { systemId, pointId } = await smallSystem(w);
     return { systemId, entry: "point", id: pointId };
@@ -264,6 +266,8 @@ export const SAMPLES: Record<string, Sample> = {
   }),
   "window.end-no-test": async (w) => ({ noTestId: (await addNoTest(w.owner.context, noTest(w))).noTestId }),
 };
+
+const deviceFile = { name: "points.csv", content: "address,kind,label\r\n1-001,smoke,Lobby\r\n1-002,pull,Stair\r\n" };
 
 const stationAccount = (w: World) => ({
   siteId: w.site.siteId,
