@@ -71,7 +71,7 @@ test.skipIf(!here)(
       `${hired.length} confirmed, ${refused} refused, ${kept.size - 1 - hired.length} kept without an answer`,
     );
     expect(refused).toBeGreaterThan(0);
-    expect(hired.length).toBeGreaterThan(100);
+    expect(hired.length).toBeGreaterThanOrEqual(100);
     expect(hired.filter((email) => kept.get(email)?.join() !== "1,1,1,1")).toEqual([]);
     // The owner came with the company, by another verb.
     const halves = [...kept].filter(([email, parts]) => parts.join() !== "1,1,1,1" && hired.includes(email));
