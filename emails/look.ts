@@ -3,7 +3,7 @@ export const LOOK = {
   ground: "#f6f4ef",
   surface: "#fffdf9",
   ink: "#17222d",
-  steel: "#526270",
+  steel: "#5b6b7a",
   line: "#d9d5cb",
   still: "#0e6b6b",
   onStill: "#ffffff",

@@ -1,6 +1,8 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
 import { expect, test } from "vitest";
+import { LOOK } from "@/emails/look";
+import { contrast } from "./wcag";
 
 const css = readFileSync(join(import.meta.dirname, "../../app/globals.css"), "utf8");
 
@@ -18,21 +20,6 @@ function colorOf(token: string, theme: Theme): string {
   const color = tokens.get(token)?.[theme];
   if (!color) throw new Error(`no token ${token}`);
   return color;
-}
-
-/** Relative luminance, WCAG 2.2, "Dfn: relative luminance". */
-function luminance(hex: string): number {
-  const [red = 0, green = 0, blue = 0] = [1, 3, 5].map((at) => {
-    const share = Number.parseInt(hex.slice(at, at + 2), 16) / 255;
-    return share <= 0.04045 ? share / 12.92 : ((share + 0.055) / 1.055) ** 2.4;
-  });
-  return 0.2126 * red + 0.7152 * green + 0.0722 * blue;
-}
-
-/** Contrast ratio, WCAG 2.2, "Dfn: contrast ratio". */
-function contrast(one: string, other: string): number {
-  const [light = 0, dark = 0] = [luminance(one), luminance(other)].sort((a, b) => b - a);
-  return (light + 0.05) / (dark + 0.05);
 }
 
 test("the formula gives the published values", () => {
@@ -68,6 +55,28 @@ const pairs = (table: readonly [string, readonly string[]][], least: number) =>
 
 test.each([...pairs(TEXT, 4.5), ...pairs(MARKS, 3)])("%s: %s on %s reaches %s:1", (theme, token, ground, least) => {
   expect(contrast(colorOf(token, theme), colorOf(ground, theme))).toBeGreaterThanOrEqual(least);
+});
+
+/** Mail programs know no style sheets of ours, and most no dark theme: letters are drawn in the light one. */
+test.each([
+  ["ground", "ground"],
+  ["surface", "surface"],
+  ["ink", "ink"],
+  ["steel", "steel"],
+  ["line", "line"],
+  ["still", "still"],
+  ["onStill", "on-strong"],
+] as const)("%s of the letters is the light %s", (ofLetters, token) => {
+  expect(LOOK[ofLetters]).toBe(colorOf(token, "light"));
+});
+
+test.each([
+  ["ink", "surface"],
+  ["steel", "surface"],
+  ["still", "surface"],
+  ["onStill", "still"],
+] as const)("letters: %s on %s reaches 4.5:1", (text, ground) => {
+  expect(contrast(LOOK[text], LOOK[ground])).toBeGreaterThanOrEqual(4.5);
 });
 
 test("no color is written anywhere but in the tokens", () => {
