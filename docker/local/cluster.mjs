@@ -21,6 +21,10 @@ import { run } from "./run.mjs";
 
 const startPatience = 60_000;
 
+// Lets the server end with its launcher even if that is killed; elsewhere than on Linux the next start ends it.
+const setpriv = "/usr/bin/setpriv";
+const untilParentDies = existsSync(setpriv) ? [setpriv, "--pdeathsig", "INT"] : [];
+
 /** PostgreSQL refuses to run as root; its package brings the user that it runs as. */
 async function serverUser() {
   if (!isRoot) return {};
@@ -126,10 +130,12 @@ export async function startCluster(folder, { onLaunch } = {}) {
   const kept = readState(join(folder, "postgres-port.json"), undefined);
   const port = await freePort(kept);
   writeState(join(folder, "postgres-port.json"), port);
+  const options = settings(port).flatMap(([name, value]) => ["-c", `${name}=${value}`]);
+  const [command, ...args] = [...untilParentDies, join(programs, "postgres"), "-D", data, ...options];
   const server = {
     name: "PostgreSQL",
-    command: join(programs, "postgres"),
-    args: ["-D", data, ...settings(port).flatMap(([name, value]) => ["-c", `${name}=${value}`])],
+    command,
+    args,
     cwd: folder,
     ...user,
     onLeash: false,

@@ -1,10 +1,13 @@
-import { chmodSync, mkdtempSync, readFileSync, rmSync } from "node:fs";
+import { spawn } from "node:child_process";
+import { once } from "node:events";
+import { chmodSync, existsSync, mkdtempSync, readFileSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import postgres from "postgres";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { startCluster } from "./cluster.mjs";
 import { postgresPrograms } from "./debian.mjs";
+import { bornAt } from "./locks.mjs";
 
 type Urls = { DATABASE_URL: string; DATABASE_OWNER_URL: string; DATABASE_ADMIN_URL: string };
 
@@ -32,6 +35,8 @@ async function askUntilAnswered(url: string, text: string): Promise<unknown[]> {
     }
   }
 }
+
+const serverOf = (at: string) => Number(readFileSync(join(at, "postgres/postmaster.pid"), "utf8").split("\n")[0]);
 
 beforeAll(async () => {
   if (!here) return;
@@ -77,7 +82,7 @@ test.skipIf(!here)("asking for the same database again keeps it; asking for a fr
 
 test.skipIf(!here)("a killed server comes back by itself with what was committed", async () => {
   await ask(urls.DATABASE_OWNER_URL, "create table survives as select 1 as n");
-  process.kill(Number(readFileSync(join(folder, "postgres/postmaster.pid"), "utf8").split("\n")[0]), "SIGKILL");
+  process.kill(serverOf(folder), "SIGKILL");
   expect(await askUntilAnswered(urls.DATABASE_OWNER_URL, "select n from survives")).toEqual([{ n: 1 }]);
 });
 
@@ -86,4 +91,21 @@ test.skipIf(!here)("stopped and started again it has the same port, passwords an
   await cluster.stop();
   cluster = await startCluster(folder);
   expect(await ask(urls.DATABASE_OWNER_URL, "select n from restarted")).toEqual([{ n: 2 }]);
+});
+
+test.skipIf(!here || !existsSync("/usr/bin/setpriv"))("a killed launcher takes its server along", async () => {
+  const another = mkdtempSync(join(tmpdir(), "coastdown-cluster-"));
+  chmodSync(another, 0o711);
+  const code = `import { startCluster } from ${JSON.stringify(join(import.meta.dirname, "cluster.mjs"))};
+    await startCluster(${JSON.stringify(another)});
+    console.log("up");`;
+  const launcher = spawn(process.execPath, ["--input-type=module", "-e", code], {
+    stdio: ["ignore", "pipe", "inherit"],
+  });
+  await once(launcher.stdout, "data");
+  const server = serverOf(another);
+  expect(bornAt(server)).toBeDefined();
+  launcher.kill("SIGKILL");
+  while (bornAt(server)) await new Promise((resolve) => setImmediate(resolve));
+  rmSync(another, { recursive: true });
 });
