@@ -27,8 +27,8 @@ function benchFile(name) {
 /** Measures the product as built and with its demo company, on a cluster that nothing else uses. */
 async function bench(name) {
   const file = benchFile(name);
-  await installPackages();
   if (!process.env.DATABASE_URL) await installSystemPackages("postgres");
+  await installPackages();
   const programs = builtPrograms(await currentBuild());
   const urls = await (await openServer("bench")).database("bench", { fresh: true });
   const { address, inbox } = await bringUp({ purpose: "bench", urls, programs, held: await reservePort() });

@@ -1,4 +1,4 @@
-import { existsSync, mkdirSync, readdirSync, rmSync, statSync, writeFileSync } from "node:fs";
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from "node:fs";
 import { delimiter, join } from "node:path";
 import { folderFor, isRoot } from "./checkout.mjs";
 import { withLock } from "./locks.mjs";
@@ -25,9 +25,12 @@ export const browserProgram = () =>
   process.env.CHROMIUM ??
   ["/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bin/google-chrome"].find((file) => existsSync(file));
 
+/** For root the server runs as the package's user, which an installation that was cut off has not made yet. */
+const mayRunServer = () => !isDebian || !isRoot || /^postgres:/m.test(readFileSync("/etc/passwd", "utf8"));
+
 const needs = {
   postgres: {
-    present: () => postgresPrograms() !== undefined,
+    present: () => postgresPrograms() !== undefined && mayRunServer(),
     packages: ["postgresql", "tzdata"],
     elsewhere: `PostgreSQL ${oldestPostgres} or later, so that its \`initdb\` and \`postgres\` are on the PATH (macOS: brew install postgresql@17), or set DATABASE_URL and DATABASE_OWNER_URL`,
   },
@@ -45,8 +48,11 @@ function explain(missing) {
     : `Please install first:\n${missing.map((need) => `  - ${need.elsewhere}`).join("\n")}\n`;
 }
 
-const apt = (...args) =>
-  run("apt-get", ["-y", "-o", "DPkg::Lock::Timeout=300", ...args], { env: { DEBIAN_FRONTEND: "noninteractive" } });
+const env = { DEBIAN_FRONTEND: "noninteractive" };
+const apt = (...args) => run("apt-get", ["-y", "-o", "DPkg::Lock::Timeout=300", ...args], { env });
+
+/** An installation that was cut off, by Ctrl-C for instance, has to be finished before the next; apt-get says if not. */
+const finishCutOff = () => run("dpkg", ["--configure", "-a"], { env, mayFail: true });
 
 /** Debian would set up and start a cluster of its own with the server package; we bring ours. */
 async function withoutDefaultCluster(work) {
@@ -71,7 +77,10 @@ function zoneDataIsOld() {
 async function install(packages) {
   await step(`Installing ${packages.join(", ")} (apt-get)`, async () => {
     await apt("update");
-    await withoutDefaultCluster(() => apt("install", "--no-install-recommends", ...packages));
+    await withoutDefaultCluster(async () => {
+      await finishCutOff();
+      await apt("install", "--fix-broken", "--no-install-recommends", ...packages);
+    });
   });
   writeFileSync(lastZoneUpdate(), "");
 }

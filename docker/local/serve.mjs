@@ -27,8 +27,8 @@ function sayReady({ address, inbox, demo }) {
 
 async function prepare(purpose) {
   const ownDatabase = !process.env.DATABASE_URL;
-  await installPackages();
   if (ownDatabase) await installSystemPackages("postgres");
+  await installPackages();
   rmSync(stateFile(purpose), { force: true });
 }
 

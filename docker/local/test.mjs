@@ -75,11 +75,11 @@ async function everything() {
   let server;
   let urls;
   const ready = await check("Preparing the machine", async () => {
-    await installPackages();
     await installSystemPackages(
       ...(process.env.DATABASE_URL ? [] : ["postgres"]),
       ...(only.length > 0 ? [] : ["browser"]),
     );
+    await installPackages();
     server = await openServer("test");
     urls = await server.database("coastdown");
   });
